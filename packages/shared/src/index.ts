@@ -1,1 +1,11 @@
 export {};
+export * from './words/words.js';
+export * from './common/wire.schema.js';
+export * from './photos/photo.schema.js';
+export * from './kits/kit.schema.js';
+export * from './builds/build.schema.js';
+export * from './endorsements/endorsement.schema.js';
+export * from './fixes/fix.schema.js';
+export * from './questions/question.schema.js';
+export * from './questions/question-state.js';
+export * from './questions/question-policies.js';
