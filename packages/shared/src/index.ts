@@ -9,3 +9,6 @@ export * from './fixes/fix.schema.js';
 export * from './questions/question.schema.js';
 export * from './questions/question-state.js';
 export * from './questions/question-policies.js';
+export * from './fit-check/measured.js';
+export * from './fit-check/card-fields.js';
+export * from './fit-check/hole-card.schema.js';
