@@ -12,3 +12,4 @@ export * from './questions/question-policies.js';
 export * from './fit-check/measured.js';
 export * from './fit-check/card-fields.js';
 export * from './fit-check/hole-card.schema.js';
+export * from './fixes/traveller.js';
