@@ -13,3 +13,5 @@ export * from './fit-check/measured.js';
 export * from './fit-check/card-fields.js';
 export * from './fit-check/hole-card.schema.js';
 export * from './fixes/traveller.js';
+export * from './measures/read-length.js';
+export * from './measures/length-words.js';
