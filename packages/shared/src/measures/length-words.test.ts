@@ -7,7 +7,6 @@ import {
   formatLengthUnit,
   formatWithError,
   fractionName,
-  rivetCallOut,
   roundHalfEven,
 } from './length-words.js';
 import { readLength } from './read-length.js';
@@ -72,12 +71,6 @@ it('never shows a value on the other side of its limit', () => {
       expect(Math.sign(shown - limit)).toBe(Math.sign(value - limit));
     }),
   );
-});
-
-it('shows a rivet as it stands on the drawing', () => {
-  expect(rivetCallOut({ head: 'universal', alloy: 'AD', dash: 5, lengthDash: 5.5 })).toBe('470 AD5-5.5');
-  expect(rivetCallOut({ head: 'flush', alloy: 'AD', dash: 3 })).toBe('426 AD3');
-  expect(rivetCallOut({ dash: 4 })).toBe('4');
 });
 
 it('rounds to within half of the last place', () => {

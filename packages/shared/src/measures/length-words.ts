@@ -72,19 +72,3 @@ export function formatAgainst(value: number, limit: number | null, decimals: num
   }
   return roundHalfEven(value, most);
 }
-
-export interface CallOut {
-  readonly head?: 'universal' | 'flush' | null | undefined;
-  readonly alloy?: string | null | undefined;
-  readonly dash: number;
-  readonly lengthDash?: number | null | undefined;
-}
-
-/** Basic part numbers of the two heads, as the shop says them. */
-const HEAD_NUMBERS = { universal: '470', flush: '426' } as const;
-
-/** The rivet as it stands on the drawing: `470 AD4-4.5`; what is not known is left out. */
-export function rivetCallOut({ head, alloy, dash, lengthDash }: CallOut): string {
-  const size = `${alloy ?? ''}${dash}${lengthDash ? `-${lengthDash}` : ''}`;
-  return head ? `${HEAD_NUMBERS[head]} ${size}` : size;
-}

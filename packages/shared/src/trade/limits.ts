@@ -44,7 +44,7 @@ export const SHOP_HEAD = {
   widthNominal: limit(1.5, 'part', 'S13', 'S19'),
   heightNominal: limit(0.5, 'part', 'S13', 'S19'),
   /** Wider than this and flat: struck too often. */
-  widthOver: limit(1.7, 'house'),
+  widthOver: limit(1.6, 'house'),
 } as const;
 
 /** Thinner than this in D and bearing strength is not tabulated. */
