@@ -1,4 +1,3 @@
-export {};
 export * from './words/words.js';
 export * from './common/wire.schema.js';
 export * from './photos/photo.schema.js';
@@ -32,3 +31,7 @@ export * from './fit-check/sums/heads.js';
 export * from './fit-check/sums/bend.js';
 export * from './fit-check/sums/threads.js';
 export * from './fit-check/sums/pattern.js';
+export * from './access/roles.js';
+export * from './accounts/account.schema.js';
+export * from './chapters/chapter.schema.js';
+export * from './realtime/live-events.js';

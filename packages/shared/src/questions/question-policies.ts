@@ -1,4 +1,4 @@
-import { type Actor, isMember, isMentorIn } from '../access/roles.js';
+import { type Actor, isBuilderIn, isMember, isMentorIn } from '../access/roles.js';
 import type { Discipline, QuestionState } from '../words/words.js';
 import type { Audience } from './question.schema.js';
 
@@ -31,9 +31,7 @@ export function canSeeQuestion(
 
 /** A builder asks in a chapter where they are one. */
 export function canAskIn(actor: Actor, chapterId: string): boolean {
-  return actor.memberships.some(
-    (one) => one.chapterId === chapterId && one.status === 'active' && one.roles.includes('builder'),
-  );
+  return isBuilderIn(actor, chapterId);
 }
 
 /** Any member who may see it joins the talk; keepers of kit and site read, they do not chat as members. */

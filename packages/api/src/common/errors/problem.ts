@@ -1,0 +1,83 @@
+import { STATUS_CODES } from 'node:http';
+import { HttpException } from '@nestjs/common';
+import {
+  AppError,
+  BadInput,
+  Conflict,
+  type FieldFault,
+  NotAllowed,
+  NotFound,
+  NotSignedIn,
+  ReadsOnly,
+  TooLarge,
+  TooMany,
+  WrongType,
+} from './app-error.js';
+
+/** RFC 9457. */
+export interface Problem {
+  readonly type: string;
+  readonly title: string;
+  readonly status: number;
+  readonly detail: string;
+  readonly instance: string;
+  readonly errors?: readonly FieldFault[];
+  readonly current?: Readonly<Record<string, unknown>>;
+  readonly [extra: string]: unknown;
+}
+
+const STATUS_OF = new Map<unknown, number>([
+  [NotFound, 404],
+  [NotSignedIn, 401],
+  [NotAllowed, 403],
+  [BadInput, 400],
+  [Conflict, 409],
+  [TooLarge, 413],
+  [WrongType, 415],
+  [TooMany, 429],
+  [ReadsOnly, 503],
+]);
+
+const PLAIN: Readonly<Record<number, string>> = {
+  400: 'The request could not be read.',
+  401: 'Sign in first.',
+  403: 'That is not yours to do.',
+  404: 'There is nothing at this address.',
+  405: 'That cannot be done at this address.',
+  406: 'There is no answer in that form.',
+  408: 'The request took too long to arrive.',
+  409: 'It does not fit how things stand.',
+  413: 'What was sent is too large.',
+  414: 'The address is too long.',
+  415: 'What was sent is of a kind that is not taken here.',
+  429: 'Too many requests. Try again a little later.',
+  431: 'The headers are too large.',
+  500: 'Something went wrong here. What was saved before is kept.',
+  503: 'Not ready. Try again in a moment.',
+  507: 'The disk is full: nothing was changed. Reading goes on.',
+};
+
+/** Fastify and its parsers put a status on their errors; SQLite puts a code. */
+function statusOf(error: unknown): number {
+  if (error instanceof AppError) return STATUS_OF.get(error.constructor) ?? 500;
+  if (error instanceof HttpException) return error.getStatus();
+  if (typeof error !== 'object' || error === null) return 500;
+  const { code, statusCode } = error as { code?: unknown; statusCode?: unknown };
+  if (code === 'SQLITE_FULL' || code === 'ENOSPC') return 507;
+  return typeof statusCode === 'number' && statusCode >= 400 && statusCode < 500 ? statusCode : 500;
+}
+
+/** Nothing but our own words leaves: a message of a library may name a path, a statement or a line of code. */
+export function problemOf(error: unknown, instance: string): Problem {
+  const status = statusOf(error);
+  const base = { type: 'about:blank', title: STATUS_CODES[status] ?? 'Error', status, instance };
+  if (!(error instanceof AppError))
+    return { ...base, detail: PLAIN[status] ?? PLAIN[status < 500 ? 400 : 500]! };
+  return {
+    ...base,
+    title: error.title,
+    detail: error.message,
+    ...(error instanceof BadInput ? { errors: error.faults } : {}),
+    ...(error instanceof Conflict && error.current ? { ...error.current, current: error.current } : {}),
+  };
+}
