@@ -16,8 +16,6 @@ export function writerOptions(settings: Settings, entities: Classes, migrations:
     database: settings.databaseFile,
     entities: entities as never,
     migrations: migrations as never,
-    migrationsRun: settings.writes,
-    migrationsTransactionMode: 'each',
     synchronize: false,
     enableWAL: true,
     timeout: BUSY_MS,
