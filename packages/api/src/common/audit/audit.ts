@@ -14,5 +14,13 @@ export interface AuditLine {
 export async function writeAudit(manager: EntityManager, line: AuditLine): Promise<void> {
   const [subjectType, subjectId] = line.subject;
   const { at, byId, what, detail = {} } = line;
-  await manager.insert(AuditTrailEntity, { id: newId(), at, byId, what, subjectType, subjectId, detail: detail as object });
+  await manager.insert(AuditTrailEntity, {
+    id: newId(),
+    at,
+    byId,
+    what,
+    subjectType,
+    subjectId,
+    detail: detail as object,
+  });
 }

@@ -25,7 +25,6 @@ export function writerOptions(settings: Settings, entities: Classes, migrations:
 
 export function readerOptions(settings: Settings, entities: Classes): DataSourceOptions {
   return {
-    name: READER,
     type: 'better-sqlite3',
     database: settings.databaseFile,
     entities: entities as never,

@@ -24,7 +24,7 @@ export class DatabaseModule {
         TypeOrmModule.forRootAsync({
           name: READER,
           inject: [Settings],
-          useFactory: (settings: Settings) => readerOptions(settings, entities),
+          useFactory: (settings: Settings) => ({ ...readerOptions(settings, entities), name: READER }),
         }),
       ],
       providers: [UnitOfWork, PreparedReader, Reader],

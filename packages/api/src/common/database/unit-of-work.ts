@@ -48,10 +48,10 @@ export class UnitOfWork implements OnApplicationShutdown {
         const result = await this.inside.run(true, () => work(tx));
         keepAnswer(this.prepared, result);
         this.database.exec('COMMIT');
-        runner.isTransactionActive = false;
+        setActive(runner, false);
         return { result, recorded };
       } catch (error) {
-        runner.isTransactionActive = false;
+        setActive(runner, false);
         if (this.database.inTransaction) this.database.exec('ROLLBACK');
         throw error;
       }
@@ -80,7 +80,7 @@ export class UnitOfWork implements OnApplicationShutdown {
     const runner = this.writer.createQueryRunner();
     // TypeORM would begin a deferred transaction; told that one is active, it starts none of its own.
     this.database.exec('BEGIN IMMEDIATE');
-    runner.isTransactionActive = true;
+    setActive(runner, true);
     return runner;
   }
 
@@ -110,4 +110,9 @@ function startNow<T>(unit: () => Promise<T>): Promise<T> {
   } catch (error) {
     return Promise.reject(error instanceof Error ? error : new Error(String(error)));
   }
+}
+
+/** Read-only in the types; TypeORM sets it itself around the transactions that it begins. */
+function setActive(runner: QueryRunner, active: boolean): void {
+  (runner as { isTransactionActive: boolean }).isTransactionActive = active;
 }

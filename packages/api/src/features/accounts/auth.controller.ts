@@ -1,0 +1,89 @@
+import { Body, Controller, HttpCode, Post, Req, Res } from '@nestjs/common';
+import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import {
+  type ConfirmEmail,
+  confirmEmailSchema,
+  type ForgotPassword,
+  forgotPasswordSchema,
+  mailSentSchema,
+  type ResetPassword,
+  resetPasswordSchema,
+  type SignedIn,
+  signedInSchema,
+  type SignIn,
+  signInSchema,
+  type SignUp,
+  signUpSchema,
+} from '@rivetside/shared';
+import type { FastifyReply, FastifyRequest } from 'fastify';
+import { Public } from '../../common/access/access.decorator.js';
+import { AuthService } from './auth.service.js';
+
+@ApiTags('sign-in')
+@Controller('auth')
+export class AuthController {
+  constructor(private readonly auth: AuthService) {}
+
+  @Post('sign-up')
+  @HttpCode(202)
+  @Public()
+  @ApiOkResponse({ standardSchema: mailSentSchema })
+  signUp(@Body({ schema: signUpSchema }) input: SignUp, @Req() request: FastifyRequest) {
+    return this.auth.signUp(input, request.ip);
+  }
+
+  @Post('confirm-email')
+  @HttpCode(204)
+  @Public()
+  confirmEmail(@Body({ schema: confirmEmailSchema }) { token }: ConfirmEmail): Promise<void> {
+    return this.auth.confirmEmail(token);
+  }
+
+  @Post('sign-in')
+  @HttpCode(200)
+  @Public()
+  @ApiOkResponse({ standardSchema: signedInSchema })
+  signIn(
+    @Body({ schema: signInSchema }) input: SignIn,
+    @Req() request: FastifyRequest,
+    @Res({ passthrough: true }) reply: FastifyReply,
+  ): Promise<SignedIn> {
+    return this.auth.signIn(input, request, reply);
+  }
+
+  @Post('refresh')
+  @HttpCode(200)
+  @Public()
+  @ApiOkResponse({ standardSchema: signedInSchema })
+  refresh(
+    @Req() request: FastifyRequest,
+    @Res({ passthrough: true }) reply: FastifyReply,
+  ): Promise<SignedIn> {
+    return this.auth.refresh(request, reply);
+  }
+
+  @Post('sign-out')
+  @HttpCode(204)
+  @Public()
+  signOut(@Req() request: FastifyRequest, @Res({ passthrough: true }) reply: FastifyReply): Promise<void> {
+    return this.auth.signOut(request, reply);
+  }
+
+  @Post('forgot-password')
+  @HttpCode(202)
+  @Public()
+  @ApiOkResponse({ standardSchema: mailSentSchema })
+  forgotPassword(
+    @Body({ schema: forgotPasswordSchema }) input: ForgotPassword,
+    @Req() request: FastifyRequest,
+  ) {
+    return this.auth.forgotPassword(input, request.ip);
+  }
+
+  @Post('reset-password')
+  @HttpCode(204)
+  @Public()
+  resetPassword(@Body({ schema: resetPasswordSchema }) input: ResetPassword): Promise<void> {
+    return this.auth.resetPassword(input);
+  }
+}

@@ -1,0 +1,77 @@
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post } from '@nestjs/common';
+import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import {
+  type Actor as ActorType,
+  type ChangeEmail,
+  changeEmailSchema,
+  type ChangeMe,
+  changeMeSchema,
+  type ChangePassword,
+  changePasswordSchema,
+  type Me,
+  meSchema,
+  pageOf,
+  type Session,
+  sessionSchema,
+} from '@rivetside/shared';
+import { Access, Actor } from '../../common/access/access.decorator.js';
+import { UuidPipe } from '../../common/http/uuid.pipe.js';
+import { MeService } from './me.service.js';
+import { SessionsService } from './sessions.service.js';
+
+@ApiTags('me')
+@Controller('me')
+export class MeController {
+  constructor(
+    private readonly me: MeService,
+    private readonly sessions: SessionsService,
+  ) {}
+
+  @Get()
+  @Access('authenticated')
+  @ApiOkResponse({ standardSchema: meSchema })
+  read(@Actor() actor: ActorType): Promise<Me> {
+    return this.me.read(actor.id);
+  }
+
+  @Patch()
+  @Access('authenticated')
+  @ApiOkResponse({ standardSchema: meSchema })
+  change(@Actor() actor: ActorType, @Body({ schema: changeMeSchema }) input: ChangeMe): Promise<Me> {
+    return this.me.change(actor, input);
+  }
+
+  @Post('password')
+  @HttpCode(204)
+  @Access('authenticated')
+  changePassword(
+    @Actor() actor: ActorType,
+    @Body({ schema: changePasswordSchema }) input: ChangePassword,
+  ): Promise<void> {
+    return this.me.changePassword(actor, input);
+  }
+
+  @Post('email')
+  @HttpCode(202)
+  @Access('authenticated')
+  changeEmail(
+    @Actor() actor: ActorType,
+    @Body({ schema: changeEmailSchema }) input: ChangeEmail,
+  ): Promise<void> {
+    return this.me.changeEmail(actor, input);
+  }
+
+  @Get('sessions')
+  @Access('authenticated')
+  @ApiOkResponse({ standardSchema: pageOf(sessionSchema) })
+  listSessions(@Actor() actor: ActorType): { items: Session[]; nextCursor: null } {
+    return { items: this.sessions.list(actor), nextCursor: null };
+  }
+
+  @Delete('sessions/:id')
+  @HttpCode(204)
+  @Access('authenticated')
+  endSession(@Actor() actor: ActorType, @Param('id', UuidPipe) id: string): Promise<void> {
+    return this.sessions.end(actor, id);
+  }
+}
