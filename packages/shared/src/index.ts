@@ -35,3 +35,7 @@ export * from './access/roles.js';
 export * from './accounts/account.schema.js';
 export * from './chapters/chapter.schema.js';
 export * from './realtime/live-events.js';
+export * from './search/search-terms.js';
+export * from './search/search.schema.js';
+export * from './search/fragments.js';
+export * from './fit-check/fit-check.js';

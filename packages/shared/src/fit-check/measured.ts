@@ -21,9 +21,9 @@ export function errorOf(measured: Measured): number {
   return typeof measured === 'number' ? 0 : (measured.u ?? 0);
 }
 
-/** A length as it is said in a message: no trailing noughts, no more than four decimals. */
+/** A length as it is said in a message: no trailing noughts, no more than five decimals, which 5/32 needs. */
 export function said(value: number): string {
-  return String(Number(value.toFixed(4)));
+  return String(Math.round(value * 1e5) / 1e5);
 }
 
 interface MeasuredRules {

@@ -62,7 +62,7 @@ export function pitchCode(ratio: number, minimumD: number): PitchCode {
   return reaches(PITCH_MAXIMUM_D.value, ratio) ? 'ok' : 'too_far';
 }
 
-export const PITCH_VERDICTS: Readonly<Record<PitchCode, Verdict>> = {
+const PITCH_VERDICTS: Readonly<Record<PitchCode, Verdict>> = {
   too_close: 'outside',
   tight: 'marginal',
   ok: 'inside',
