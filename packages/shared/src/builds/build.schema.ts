@@ -61,3 +61,12 @@ export const clearOpenItemSchema = z
   .strictObject({ note: z.string().trim().min(3, 'Say what was done.').max(2_000) })
   .meta({ id: 'ClearOpenItem' });
 export type ClearOpenItem = z.infer<typeof clearOpenItemSchema>;
+
+export const stepStatesSchema = z
+  .strictObject({
+    steps: z
+      .array(z.strictObject({ stepId: z.string(), state: z.enum(['todo', 'pinned', 'driven']) }))
+      .max(200, 'At most 200 steps at a time.'),
+  })
+  .meta({ id: 'StepStates' });
+export type StepStates = z.infer<typeof stepStatesSchema>;

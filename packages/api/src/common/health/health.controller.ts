@@ -49,11 +49,9 @@ export class HealthController {
       'SELECT count(*) AS n FROM "outbox" WHERE "sentAt" IS NULL AND "attempts" > 0',
     );
     const unset = this.settings.production && !this.settings.env.SMTP_URL;
-    return this.indicator
-      .check('mail')
-      .up({
-        failedAndWaiting: waiting?.n ?? 0,
-        ...(unset ? { note: 'SMTP_URL is not set: mails wait' } : {}),
-      });
+    return this.indicator.check('mail').up({
+      failedAndWaiting: waiting?.n ?? 0,
+      ...(unset ? { note: 'SMTP_URL is not set: mails wait' } : {}),
+    });
   }
 }
