@@ -39,3 +39,6 @@ export * from './search/search-terms.js';
 export * from './search/search.schema.js';
 export * from './search/fragments.js';
 export * from './fit-check/fit-check.js';
+export * from './fit-check/fit-check-words.js';
+export * from './fit-check/headline.js';
+export * from './fit-check/as-done-check.js';

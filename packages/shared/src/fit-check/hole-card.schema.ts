@@ -44,6 +44,7 @@ export const CHECK_CODES = [
   'too_far',
   'over_hole_maximum',
   'no_drill',
+  'not_cleaned',
   'skips_size',
   'heads_touch',
   'heads_close',

@@ -82,7 +82,7 @@ function overTheLimit(facts: Facts, atLeast: number, maximum: number): CheckLine
 function finalCode(side: Side, skips: boolean): CheckCode {
   if (skips) return 'skips_size';
   if (side === 'inside') return 'ok';
-  return side === 'outside' ? 'no_drill' : 'too_close_to_call';
+  return side === 'outside' ? 'not_cleaned' : 'too_close_to_call';
 }
 
 const DRILL_SOURCE = `${sourceOf({ source: ['S20'], how: 'restated' })}; exact geometry`;

@@ -29,9 +29,10 @@ function negative(pitch: NonNullable<NonNullable<HoleCard['drawn']>['pitch']>) {
   return typeof pitch === 'number' ? -pitch : { ...pitch, value: -pitch.value };
 }
 
-/** A measured edge that is short may be the fault itself: then the card does not tell what the drawing has. */
+/** A measured edge that is short, or may be, can be the fault itself: the card does not tell what the drawing has. */
 function untoldWhereShort(line: CheckLine): CheckLine {
-  if (line.verdict !== 'outside' || line.id === 'length') return line;
+  const short = line.verdict === 'outside' || line.code === 'too_close_to_call';
+  if (!short || line.id === 'length') return line;
   const facts = { id: line.id, label: line.label, unit: line.unit, source: line.source };
   return notKnown(facts, 'the edge distance and pitch of the drawing', 'as drawn');
 }
