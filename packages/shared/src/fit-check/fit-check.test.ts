@@ -1,7 +1,13 @@
 import { cardA, cardB, doublerCard } from '../testing/worked-cards.js';
 import type { HoleCard } from './card-fields.js';
 import { ENGINE_VERSION, fitCheck } from './fit-check.js';
-import { fitCheckSchema, type CheckLine, type RemedyCheck, type RemedyKind } from './hole-card.schema.js';
+import {
+  fitCheckSchema,
+  holeCardSchema,
+  type CheckLine,
+  type RemedyCheck,
+  type RemedyKind,
+} from './hole-card.schema.js';
 
 function remedy(card: HoleCard, kind: RemedyKind): RemedyCheck {
   return fitCheck(card).remedies.find((one) => one.kind === kind)!;
@@ -315,5 +321,52 @@ describe('what was not measured', () => {
     const leave = remedy(card, 'leave');
     expect(leave.checks.some(({ id }) => /^(edge|pitch)/.test(id))).toBe(false);
     expect(leave.checks.find(({ id }) => id === 'strength')).toMatchObject({ verdict: 'inside', value: 100 });
+  });
+});
+
+describe('a card with everything that may stand on it', () => {
+  // As it comes over the wire: nulls, bare numbers, an oblong hole, a bend.
+  const wire: unknown = JSON.parse(`{
+    "layers": [
+      { "name": "rear spar", "partId": null, "alloy": "2024-T3 clad", "thickness": 0.04,
+        "hole": { "shape": "round", "diameter": 0.1285 }, "offset": { "x": 0, "y": 0 },
+        "edges": [{ "distance": 0.41, "angle": 270 }], "bends": [], "finish": "primed" },
+      { "name": "doubler", "partId": null, "alloy": "2024-T3 clad", "thickness": 0.063,
+        "hole": { "shape": "oblong", "width": 0.1285, "length": 0.131, "angle": 90 }, "offset": { "x": 0, "y": 0.027 },
+        "edges": [{ "distance": 0.322, "angle": 90, "minimumD": null }],
+        "bends": [{ "distance": 0.31, "angle": 270 }], "finish": "primed" }
+    ],
+    "rivet": { "head": "universal", "alloy": "AD", "dash": 4 },
+    "neighbours": [{ "x": -0.61, "y": 0, "dash": 4 }, { "x": 0.64, "y": 0, "dash": 4 }],
+    "group": { "count": 22, "oversize": 0, "adjacentOversize": 0 },
+    "flags": { "critical": false, "controlSurface": false, "fuelWet": false, "pressurised": false, "crack": false },
+    "access": "both"
+  }`);
+  const card = holeCardSchema.parse(wire);
+
+  it('is checked on every line', () => {
+    const next = remedy(card, 'nextSize');
+    expect(fitCheck(card)).toMatchObject({ missing: [], stopAndAsk: [] });
+    expect(next.checks.map(({ id }) => id)).toEqual([
+      'cleanUp',
+      'edge:0:0',
+      'edge:1:0',
+      'pitch:0',
+      'headClearance:0',
+      'pitch:1',
+      'headClearance:1',
+      'bend:1:0',
+      'thickness:0',
+      'thickness:1',
+      'strength',
+      'length',
+      'pattern',
+    ]);
+  });
+
+  it('needs 0.15675 for the far end of the oblong, and has the bend where the centre moves to', () => {
+    expect(line(card, 'leave', 'round').value).toBeCloseTo(0.1285 + 0.027 + 0.00125, 9);
+    expect(remedy(card, 'nextSize').centre!.y).toBeCloseTo(0.014125, 9);
+    expect(line(card, 'nextSize', 'bend:1:0').value).toBeCloseTo((0.31 - 0.012875) / 0.15625, 9);
   });
 });
