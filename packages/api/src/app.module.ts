@@ -14,17 +14,19 @@ import { IdempotencyJob } from './common/idempotency/idempotency.job.js';
 import { LoggingModule } from './common/logging/logging.module.js';
 import { MailModule } from './common/mail/mail.module.js';
 import { RealtimeModule } from './common/realtime/realtime.module.js';
+import type { Clock } from './common/time/clock.js';
 import { entities } from './database/entities.js';
 import { migrations } from './database/migrations/index.js';
 import { features } from './features/features.js';
+import { DemoLoader } from './seed/demo-loader.js';
 
 @Module({})
 export class AppModule {
-  static with(settings: Settings): DynamicModule {
+  static with(settings: Settings, clock: Clock, modules: readonly (new () => object)[] = []): DynamicModule {
     return {
       module: AppModule,
       imports: [
-        SettingsModule.with(settings),
+        SettingsModule.with(settings, clock),
         LoggingModule.with(settings),
         DatabaseModule.with(entities, migrations),
         EventEmitterModule.forRoot({ global: true, wildcard: false, ignoreErrors: true }),
@@ -34,9 +36,11 @@ export class AppModule {
         RealtimeModule,
         HealthModule,
         ...features,
+        ...modules,
       ],
       providers: [
         IdempotencyJob,
+        DemoLoader,
         { provide: APP_FILTER, useClass: AppErrorFilter },
         { provide: APP_PIPE, useValue: validationPipe },
         { provide: APP_INTERCEPTOR, useClass: IdempotencyInterceptor },

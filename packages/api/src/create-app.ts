@@ -7,13 +7,22 @@ import { makeAdapter, prepareHttp } from './common/http/http.js';
 import { serveWebPage } from './common/http/web-page.js';
 import { serveDocs } from './common/openapi/docs.js';
 import { LiveAdapter } from './common/realtime/live.adapter.js';
+import { Clock } from './common/time/clock.js';
 import { migrate } from './database/migrate.js';
 
-/** The whole app, ready to listen: also what the tests start. */
-export async function createApp(settings: Settings, webRoot: string | null): Promise<NestFastifyApplication> {
+export interface AppParts {
+  /** Where the built page lies; without it the app is an API only. */
+  readonly webRoot?: string | undefined;
+  readonly clock?: Clock | undefined;
+  readonly modules?: readonly (new () => object)[] | undefined;
+}
+
+/** The whole app, ready to listen: also what the tests start, with a clock and modules of their own. */
+export async function createApp(settings: Settings, parts: AppParts = {}): Promise<NestFastifyApplication> {
+  const { webRoot, clock = new Clock(), modules = [] } = parts;
   if (settings.writes) await migrate(settings);
   const app = await NestFactory.create<NestFastifyApplication>(
-    AppModule.with(settings),
+    AppModule.with(settings, clock, modules),
     makeAdapter(settings),
     {
       bufferLogs: true,

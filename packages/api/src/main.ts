@@ -25,7 +25,7 @@ async function start(): Promise<void> {
   try {
     const settings = new Settings(readEnv(process.env));
     port = settings.env.PORT;
-    const app = await createApp(settings, existsSync(WEB_ROOT) ? WEB_ROOT : null);
+    const app = await createApp(settings, existsSync(WEB_ROOT) ? { webRoot: WEB_ROOT } : {});
     await app.init();
     if (settings.demo && settings.writes) await app.get(DemoLoader).loadIntoEmpty();
     await app.listen(port, settings.env.HOST);

@@ -5,10 +5,13 @@ import { Settings } from './settings.js';
 @Global()
 @Module({})
 export class SettingsModule {
-  static with(settings: Settings): DynamicModule {
+  static with(settings: Settings, clock: Clock): DynamicModule {
     return {
       module: SettingsModule,
-      providers: [{ provide: Settings, useValue: settings }, Clock],
+      providers: [
+        { provide: Settings, useValue: settings },
+        { provide: Clock, useValue: clock },
+      ],
       exports: [Settings, Clock],
     };
   }
