@@ -36,15 +36,17 @@ export interface TestAppOptions {
   readonly webRoot?: string;
   /** Modules with routes of the test's own. */
   readonly modules?: readonly (new () => object)[];
+  /** Hears the log; LOG_LEVEL is silent unless set. */
+  readonly log?: { write(line: string): void };
 }
 
 /** The whole app with its real migrations on a SQLite file of its own, listening on a free port. */
-export async function startTestApp({ env = {}, webRoot, modules }: TestAppOptions = {}): Promise<TestApp> {
+export async function startTestApp({ env = {}, ...parts }: TestAppOptions = {}): Promise<TestApp> {
   const dataDir = mkdtempSync(join(tmpdir(), 'rivetside-test-'));
   const defaults = { NODE_ENV: 'test', PORT: '0', DATA_DIR: dataDir, DEMO: '0', LOG_LEVEL: 'silent' };
   const settings = new Settings(readEnv({ ...defaults, ...env }));
   const clock = new TestClock();
-  const app = await createApp(settings, { webRoot, clock, modules });
+  const app = await createApp(settings, { ...parts, clock });
   await app.listen(0, '127.0.0.1');
   const server = app.getHttpServer() as unknown as Server;
   const tokenOf = (user: { id: string; sessionId: string }) =>

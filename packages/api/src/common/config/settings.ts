@@ -25,6 +25,11 @@ export class Settings {
     return this.env.DEMO === undefined ? !this.production : this.env.DEMO === '1';
   }
 
+  /** Held for as long as this process writes. */
+  get lockFile(): string {
+    return join(this.dataDir, 'writer.lock');
+  }
+
   get databaseFile(): string {
     return join(this.dataDir, 'rivetside.sqlite');
   }

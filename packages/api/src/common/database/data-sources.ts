@@ -9,8 +9,12 @@ const BUSY_MS = 5_000;
 
 type Classes = MixedList<new () => object>;
 
-/** A data source has one connection, and two transactions on it become one: hence one to write and one to read. */
+/**
+ * A data source has one connection, and two transactions on it become one: hence one to write and one to read. In a
+ * process that does not write, the one to write cannot.
+ */
 export function writerOptions(settings: Settings, entities: Classes, migrations: Classes): DataSourceOptions {
+  if (!settings.writes) return readerOptions(settings, entities);
   return {
     type: 'better-sqlite3',
     database: settings.databaseFile,

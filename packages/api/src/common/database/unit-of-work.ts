@@ -1,5 +1,5 @@
 import { AsyncLocalStorage } from 'node:async_hooks';
-import { Injectable, type OnApplicationShutdown } from '@nestjs/common';
+import { Injectable, Logger, type OnApplicationShutdown } from '@nestjs/common';
 import { EventEmitter2 } from '@nestjs/event-emitter';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { Database } from 'better-sqlite3';
@@ -7,7 +7,7 @@ import { DataSource, type EntityManager, type QueryRunner } from 'typeorm';
 import { Settings } from '../config/settings.js';
 import { ReadsOnly } from '../errors/app-error.js';
 import type { DomainEvent } from '../events/domain-event.js';
-import { keepAnswer } from '../idempotency/kept-answers.js';
+import { asNobodysAnswer, keepAnswer } from '../idempotency/kept-answers.js';
 import { PreparedDb } from './prepared.js';
 import { rawConnection } from './raw-connection.js';
 
@@ -23,6 +23,7 @@ export interface Tx {
  */
 @Injectable()
 export class UnitOfWork implements OnApplicationShutdown {
+  private readonly logger = new Logger(UnitOfWork.name);
   private readonly inside = new AsyncLocalStorage<true>();
   private readonly database: Database;
   private readonly prepared: PreparedDb;
@@ -48,12 +49,13 @@ export class UnitOfWork implements OnApplicationShutdown {
         const result = await this.inside.run(true, () => work(tx));
         keepAnswer(this.prepared, result);
         this.database.exec('COMMIT');
-        setActive(runner, false);
         return { result, recorded };
       } catch (error) {
-        setActive(runner, false);
+        // A full disk has rolled back already.
         if (this.database.inTransaction) this.database.exec('ROLLBACK');
         throw error;
+      } finally {
+        setActive(runner, false);
       }
     });
   }
@@ -63,7 +65,9 @@ export class UnitOfWork implements OnApplicationShutdown {
     return this.next(() => {
       const recorded: DomainEvent[] = [];
       const transaction = this.database.transaction(() => {
-        const result = work(this.prepared, (event) => recorded.push(event));
+        const result = this.inside.run(true, () => work(this.prepared, (event) => recorded.push(event)));
+        // Its awaiting would go on after the commit, outside of any transaction.
+        if (result instanceof Promise) throw new Error('A prepared unit awaits nothing.');
         keepAnswer(this.prepared, result);
         return result;
       });
@@ -74,6 +78,15 @@ export class UnitOfWork implements OnApplicationShutdown {
   /** A stop waits for the units that were taken in. */
   async onApplicationShutdown(): Promise<void> {
     await this.queue;
+  }
+
+  /** The write stands whatever becomes of those who are told: their trouble is not its sender's. */
+  private publish(event: DomainEvent): void {
+    try {
+      asNobodysAnswer(() => this.events.emit(event.topic, event));
+    } catch (error) {
+      this.logger.error({ err: error, topic: event.topic }, 'a listener failed');
+    }
   }
 
   private begin(): QueryRunner {
@@ -98,7 +111,7 @@ export class UnitOfWork implements OnApplicationShutdown {
     this.queue = settled;
     void settled.then(() => (this.waiting -= 1));
     return turn.then(({ result, recorded }) => {
-      for (const event of recorded) this.events.emit(event.topic, event);
+      for (const event of recorded) this.publish(event);
       return result;
     });
   }

@@ -1,33 +1,38 @@
 import { type ArgumentsHost, Catch, type ExceptionFilter, HttpException, Logger } from '@nestjs/common';
 import type { FastifyReply, FastifyRequest } from 'fastify';
-import { TooMany } from './app-error.js';
-import { problemOf } from './problem.js';
+import { AppError, TooMany, WrongMethod } from './app-error.js';
+import { problemOf, statusOf } from './problem.js';
+
+const logger = new Logger('Refusals');
+const TOO_MANY_SECONDS = 60;
+
+type KnownRequest = FastifyRequest & {
+  user?: { readonly id: string };
+  server: { allowedAt?: (url: string) => string[] };
+};
 
 /** The one place that knows HTTP statuses. */
 @Catch()
 export class AppErrorFilter implements ExceptionFilter {
-  private readonly logger = new Logger('Refusals');
-
   catch(error: unknown, host: ArgumentsHost): void {
+    // A socket's handler answers by its own acknowledgement.
+    if (host.getType() !== 'http') {
+      logger.error({ err: error }, 'a socket handler failed');
+      return;
+    }
     const http = host.switchToHttp();
-    sendProblem(error, http.getRequest<FastifyRequest>(), http.getResponse<FastifyReply>());
-    this.log(error, http.getRequest<FastifyRequest>());
-  }
-
-  private log(error: unknown, request: FastifyRequest): void {
-    const { status } = problemOf(error, '');
-    const facts = { requestId: request.id, method: request.method, status };
-    if (status >= 500) this.logger.error({ ...facts, err: error }, 'failed');
-    else this.logger.log({ ...facts, reason: error instanceof Error ? error.message : 'refused' }, 'refused');
+    const request = http.getRequest<KnownRequest>();
+    refuse(request.is404 ? addressFault(error, request) : error, request, http.getResponse<FastifyReply>());
   }
 }
 
-/** Also used by Fastify's own handlers, for what never reaches Nest. */
-export function sendProblem(error: unknown, request: FastifyRequest, reply: FastifyReply): void {
+/** Also used for what never reaches Nest, such as an address that cannot be read. */
+export function refuse(error: unknown, request: KnownRequest, reply: FastifyReply): void {
+  log(error, request);
   if (reply.sent) return;
   const problem = problemOf(error, request.url.split('?')[0] ?? '/');
-  const retryAfter = retryAfterOf(error);
-  if (retryAfter !== null) void reply.header('retry-after', String(retryAfter));
+  if (error instanceof WrongMethod) void reply.header('allow', error.allowed.join(', '));
+  if (problem.status === 429) void reply.header('retry-after', String(secondsOf(error)));
   void reply
     .code(problem.status)
     .header('content-type', 'application/problem+json; charset=utf-8')
@@ -35,8 +40,34 @@ export function sendProblem(error: unknown, request: FastifyRequest, reply: Fast
     .send(JSON.stringify(problem));
 }
 
-function retryAfterOf(error: unknown): number | null {
-  if (error instanceof TooMany) return error.retryAfterSeconds;
-  if (error instanceof HttpException && error.getStatus() === 429) return 60;
-  return null;
+/** Nothing matched: because of the method, or because of the address? */
+function addressFault(error: unknown, request: KnownRequest): unknown {
+  const allowed = request.server.allowedAt?.(request.url) ?? [];
+  return allowed.length === 0 || allowed.includes(request.method) ? error : new WrongMethod(allowed);
+}
+
+function secondsOf(error: unknown): number {
+  return error instanceof TooMany ? error.retryAfterSeconds : TOO_MANY_SECONDS;
+}
+
+/** Without the query: it may carry a token. */
+function log(error: unknown, request: KnownRequest): void {
+  const status = statusOf(error);
+  const facts = {
+    requestId: request.id,
+    method: request.method,
+    path: request.url.split('?')[0],
+    status,
+    ...(request.user ? { userId: request.user.id } : {}),
+  };
+  if (status >= 500 && !(error instanceof HttpException)) logger.error({ ...facts, err: error }, 'failed');
+  else logger.log({ ...facts, reason: reasonOf(error) }, 'refused');
+}
+
+/** Our own words only: a parser's message quotes what was sent, and that may be a password. */
+function reasonOf(error: unknown): string {
+  if (error instanceof AppError) return error.message;
+  if (typeof error !== 'object' || error === null) return 'refused';
+  const { code, name } = error as { code?: unknown; name?: unknown };
+  return String(code ?? name ?? 'refused');
 }

@@ -81,6 +81,28 @@ export class ReadsOnly extends AppError {
   }
 }
 
+/** Alive, but nobody should be sent here yet; `checks` says what is wrong. */
+export class NotReady extends AppError {
+  readonly title = 'Not ready';
+
+  constructor(readonly checks: Readonly<Record<string, string>>) {
+    super(
+      Object.entries(checks)
+        .map(([what, state]) => `${what}: ${state}`)
+        .join('; '),
+    );
+  }
+}
+
+/** The address exists, but not for this method; `allowed` says for which. */
+export class WrongMethod extends AppError {
+  readonly title = 'Not at this address';
+
+  constructor(readonly allowed: readonly string[]) {
+    super(`That cannot be done at this address, only ${allowed.join(', ')}.`);
+  }
+}
+
 export function authorize(allowed: boolean, why: string): asserts allowed {
   if (!allowed) throw new NotAllowed(why);
 }

@@ -7,10 +7,12 @@ import {
   type FieldFault,
   NotAllowed,
   NotFound,
+  NotReady,
   NotSignedIn,
   ReadsOnly,
   TooLarge,
   TooMany,
+  WrongMethod,
   WrongType,
 } from './app-error.js';
 
@@ -28,6 +30,7 @@ export interface Problem {
 
 const STATUS_OF = new Map<unknown, number>([
   [NotFound, 404],
+  [WrongMethod, 405],
   [NotSignedIn, 401],
   [NotAllowed, 403],
   [BadInput, 400],
@@ -36,6 +39,7 @@ const STATUS_OF = new Map<unknown, number>([
   [WrongType, 415],
   [TooMany, 429],
   [ReadsOnly, 503],
+  [NotReady, 503],
 ]);
 
 const PLAIN: Readonly<Record<number, string>> = {
@@ -57,13 +61,31 @@ const PLAIN: Readonly<Record<number, string>> = {
   507: 'The disk is full: nothing was changed. Reading goes on.',
 };
 
+/** What SQLite and the file system say, as far as the sender can do something about it. */
+const STATUS_OF_CODE: readonly (readonly [RegExp, number])[] = [
+  [/^(SQLITE_FULL|ENOSPC|EDQUOT)$/, 507],
+  [/^SQLITE_BUSY/, 503],
+  // A key that is taken or names nothing: features refuse it first, this is the net under them.
+  [/^SQLITE_CONSTRAINT_(UNIQUE|PRIMARYKEY|FOREIGNKEY)$/, 409],
+];
+
+/** A feature's own refusal is of the kind that it extends. */
+function statusOfOurs(error: AppError): number {
+  for (let kind: unknown = error.constructor; kind; kind = Object.getPrototypeOf(kind) as unknown) {
+    const status = STATUS_OF.get(kind);
+    if (status !== undefined) return status;
+  }
+  return 500;
+}
+
 /** Fastify and its parsers put a status on their errors; SQLite puts a code. */
-function statusOf(error: unknown): number {
-  if (error instanceof AppError) return STATUS_OF.get(error.constructor) ?? 500;
+export function statusOf(error: unknown): number {
+  if (error instanceof AppError) return statusOfOurs(error);
   if (error instanceof HttpException) return error.getStatus();
   if (typeof error !== 'object' || error === null) return 500;
   const { code, statusCode } = error as { code?: unknown; statusCode?: unknown };
-  if (code === 'SQLITE_FULL' || code === 'ENOSPC') return 507;
+  const known = typeof code === 'string' ? STATUS_OF_CODE.find(([form]) => form.test(code)) : undefined;
+  if (known) return known[1];
   return typeof statusCode === 'number' && statusCode >= 400 && statusCode < 500 ? statusCode : 500;
 }
 
@@ -78,6 +100,7 @@ export function problemOf(error: unknown, instance: string): Problem {
     title: error.title,
     detail: error.message,
     ...(error instanceof BadInput ? { errors: error.faults } : {}),
+    ...(error instanceof NotReady ? { checks: error.checks } : {}),
     ...(error instanceof Conflict && error.current ? { ...error.current, current: error.current } : {}),
   };
 }

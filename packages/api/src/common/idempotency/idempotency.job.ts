@@ -1,11 +1,10 @@
 import { Injectable } from '@nestjs/common';
 import { Cron, CronExpression } from '@nestjs/schedule';
 import { UnitOfWork } from '../database/unit-of-work.js';
+import { ANSWERS_KEPT_MS } from './idempotency.interceptor.js';
 import { Clock } from '../time/clock.js';
 
-const KEPT_HOURS = 24;
-
-/** Kept answers are for retries, and nobody retries after a day. */
+/** Kept answers are for retries. */
 @Injectable()
 export class IdempotencyJob {
   constructor(
@@ -15,7 +14,7 @@ export class IdempotencyJob {
 
   @Cron(CronExpression.EVERY_HOUR)
   async forgetOld(): Promise<void> {
-    const before = new Date(this.clock.now().getTime() - KEPT_HOURS * 3_600_000).toISOString();
+    const before = new Date(this.clock.now().getTime() - ANSWERS_KEPT_MS).toISOString();
     await this.unitOfWork.runPrepared((db) => {
       db.run('DELETE FROM "idempotency_keys" WHERE "createdAt" < ?', [before]);
     });

@@ -1,37 +1,35 @@
 import { type DynamicModule, Module } from '@nestjs/common';
-import type { FastifyRequest } from 'fastify';
 import { LoggerModule } from 'nestjs-pino';
+import { type DestinationStream, stdTimeFunctions } from 'pino';
 import type { Settings } from '../config/settings.js';
+import { AppLogger } from './app-logger.js';
 
-/** One JSON line an event. Successful requests are said at debug: a line each would cost more than the request. */
+/** Never in a log, at whatever depth an object is handed over. */
+const SECRETS = ['password', 'token', 'accessToken', 'refreshToken', 'authorization', 'cookie'];
+const REDACTED = SECRETS.flatMap((name) => [name, `*.${name}`, `*.*.${name}`, `*.*.*.${name}`]);
+
+/** JSON, one line an event. */
 @Module({})
 export class LoggingModule {
-  static with(settings: Settings): DynamicModule {
+  static with(settings: Settings, destination?: DestinationStream): DynamicModule {
+    const options = {
+      level: settings.env.LOG_LEVEL,
+      timestamp: stdTimeFunctions.isoTime,
+      base: { pid: process.pid },
+      formatters: { level: (level: string) => ({ level }) },
+      redact: { paths: REDACTED, remove: true },
+    };
     return {
       module: LoggingModule,
       imports: [
         LoggerModule.forRoot({
-          pinoHttp: {
-            level: settings.env.LOG_LEVEL,
-            autoLogging: false,
-            quietReqLogger: true,
-            genReqId: (request: unknown) => (request as FastifyRequest).id,
-            redact: {
-              paths: [
-                'req.headers.authorization',
-                'req.headers.cookie',
-                '*.password',
-                '*.token',
-                '*.accessToken',
-              ],
-              remove: true,
-            },
-          },
-          // The middleware would give every request a logger of its own; the filter names the request instead.
+          pinoHttp: destination ? [options, destination] : options,
+          // Its middleware would give every request a logger of its own; refusals name the request instead.
           forRoutes: [],
         }),
       ],
-      exports: [LoggerModule],
+      providers: [AppLogger],
+      exports: [LoggerModule, AppLogger],
     };
   }
 }

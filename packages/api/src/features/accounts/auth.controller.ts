@@ -1,5 +1,5 @@
 import { Body, Controller, HttpCode, Post, Req, Res } from '@nestjs/common';
-import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import { ApiAcceptedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import {
   type ConfirmEmail,
   confirmEmailSchema,
@@ -27,7 +27,7 @@ export class AuthController {
   @Post('sign-up')
   @HttpCode(202)
   @Public()
-  @ApiOkResponse({ standardSchema: mailSentSchema })
+  @ApiAcceptedResponse({ standardSchema: mailSentSchema })
   signUp(@Body({ schema: signUpSchema }) input: SignUp, @Req() request: FastifyRequest) {
     return this.auth.signUp(input, request.ip);
   }
@@ -72,7 +72,7 @@ export class AuthController {
   @Post('forgot-password')
   @HttpCode(202)
   @Public()
-  @ApiOkResponse({ standardSchema: mailSentSchema })
+  @ApiAcceptedResponse({ standardSchema: mailSentSchema })
   forgotPassword(
     @Body({ schema: forgotPasswordSchema }) input: ForgotPassword,
     @Req() request: FastifyRequest,

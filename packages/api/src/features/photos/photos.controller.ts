@@ -1,5 +1,12 @@
 import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query, Req, Res } from '@nestjs/common';
-import { ApiBody, ApiConsumes, ApiCreatedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import {
+  ApiBody,
+  ApiConsumes,
+  ApiCreatedResponse,
+  ApiOkResponse,
+  ApiProduces,
+  ApiTags,
+} from '@nestjs/swagger';
 import {
   type Actor as ActorType,
   type DescribePhoto,
@@ -64,6 +71,8 @@ export class PhotosController {
   /** The signature is the permission; it was given to somebody who may see what the photo hangs on. */
   @Get(':id/:size')
   @Public()
+  @ApiProduces('image/jpeg')
+  @ApiOkResponse({ schema: { type: 'string', format: 'binary' } })
   async show(
     @Param('id', UuidPipe) id: string,
     @Param('size') size: string,
