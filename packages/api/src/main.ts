@@ -6,10 +6,12 @@ import type { NestFastifyApplication } from '@nestjs/platform-fastify';
 import { readEnv, SettingsFault } from './common/config/env.js';
 import { Settings } from './common/config/settings.js';
 import { createApp } from './create-app.js';
+import { DEMO_PASSWORD, DemoService } from './features/demo/demo.service.js';
 import { DemoLoader } from './seed/demo-loader.js';
 
 const WEB_ROOT = fileURLToPath(new URL('../../web/dist', import.meta.url));
 const STOP_MS = 10_000;
+const IMPATIENT_MS = 1_000;
 const logger = new Logger('Process');
 
 const SENTENCES: Readonly<Record<string, (port: number) => string>> = {
@@ -36,10 +38,12 @@ function sentencesOf(error: unknown, port: number): readonly string[] {
 
 /** What was taken in is answered and written; what hangs longer than that is cut off. */
 function stopOnSignals(app: NestFastifyApplication): void {
-  let stopping = false;
+  let since = 0;
   const stop = () => {
-    if (stopping) process.exit(1);
-    stopping = true;
+    // Ctrl+C reaches this process twice, by the terminal and by the one that started it.
+    if (since > 0 && Date.now() - since > IMPATIENT_MS) process.exit(1);
+    if (since > 0) return;
+    since = Date.now();
     setTimeout(() => process.exit(1), STOP_MS).unref();
     app.close().then(
       () => process.exit(0),
@@ -69,7 +73,8 @@ async function start(): Promise<void> {
     if (settings.demo && settings.writes) await app.get(DemoLoader).loadIntoEmpty();
     await app.listen(port, settings.env.HOST);
     logger.log({ port, role: settings.env.ROLE }, 'listening');
-    process.send?.({ listening: settings.publicUrl, demo: settings.demo });
+    const demo = settings.demo ? { password: DEMO_PASSWORD, people: app.get(DemoService).signIns() } : null;
+    process.send?.({ listening: port === 0 ? await app.getUrl() : settings.publicUrl, demo });
   } catch (error) {
     process.stderr.write(`${sentencesOf(error, port).join('\n')}\n`);
     process.exit(1);

@@ -1,6 +1,7 @@
 import { AccountsModule } from './accounts/accounts.module.js';
 import { BuildsModule } from './builds/builds.module.js';
 import { ChaptersModule } from './chapters/chapters.module.js';
+import { DemoModule } from './demo/demo.module.js';
 import { KitsModule } from './kits/kits.module.js';
 import { NoticesModule } from './notices/notices.module.js';
 import { PhotosModule } from './photos/photos.module.js';
@@ -11,6 +12,7 @@ export const features = [
   AccountsModule,
   BuildsModule,
   ChaptersModule,
+  DemoModule,
   KitsModule,
   NoticesModule,
   PhotosModule,
