@@ -46,3 +46,4 @@ export type { Point } from './fit-check/geometry/enclosing-circle.js';
 export * from './fit-check/drawing/model.js';
 export * from './fit-check/drawing/description.js';
 export * from './fit-check/drawing.js';
+export { halfHole } from './fit-check/card-faults.js';

@@ -230,6 +230,28 @@ it('finds a point of the frame again', () => {
   );
 });
 
+it('hatches an edge whose measuring error crosses the limit, and only that', () => {
+  const card = doublerCard();
+  card.layers[1]!.edges = [{ distance: { value: 0.3, u: 0.01 }, angle: 90 }];
+  const drawing = draw(card);
+  const bands = of(drawing, 'area').filter(({ role }) => role === 'tooClose');
+  // The edge as the card has it, 0.300 above the doubler's own hole, which lies 0.027 above the first.
+  expect(bands).toHaveLength(1);
+  const heights = bands[0]!.points.map(({ y }) => y);
+  expect((Math.max(...heights) + Math.min(...heights)) / 2).toBeCloseTo(0.327, 9);
+  expect(Math.max(...heights) - Math.min(...heights)).toBeGreaterThanOrEqual(2 * 0.01);
+  expect(drawing.legend.at(-1)).toMatchObject({ role: 'tooClose' });
+  expect(of(draw(doublerCard()), 'area').map(({ role }) => role)).toEqual(['overlap']);
+});
+
+it('keeps to the frame that it is given', () => {
+  const { frame } = draw(doublerCard());
+  const moved = doublerCard();
+  moved.neighbours = [{ x: -1.1, y: 0, dash: 4 }];
+  expect(draw(moved).frame).not.toEqual(frame);
+  expect(draw(moved, { frame }).frame).toEqual(frame);
+});
+
 describe('the drawing in words', () => {
   it('lists every dimension that is drawn', () => {
     for (const card of [doublerCard(), cardA(), cardB(), cornerCard(), threeLayers()]) {

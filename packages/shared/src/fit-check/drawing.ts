@@ -1,7 +1,8 @@
 import { drillName, formatHole, formatLength } from '../measures/length-words.js';
-import { MM_PER_INCH, type Units } from '../measures/read-length.js';
+import type { Units } from '../measures/read-length.js';
 import { directionName, layerName, neighbourName } from './bench.js';
 import type { HoleCard } from './card-fields.js';
+import { gridFor } from './drawing/grid.js';
 import { toInches, toPixels, type DrawnHandle, type DrawnShape, type Frame } from './drawing/model.js';
 import type { HoleDrawing, LegendItem } from './drawing/model.js';
 import { acrossBox, cutAt, holeShape, REACH, sceneOf, type Scene, type Straight } from './drawing/parts.js';
@@ -16,6 +17,7 @@ import {
   type OffsetSetting,
   type Saying,
 } from './drawing/settings.js';
+import { TOO_CLOSE_WORDS, tooCloseShapes } from './drawing/too-close.js';
 import { distance, type Point } from './geometry/enclosing-circle.js';
 import type { FitCheck, RemedyKind } from './hole-card.schema.js';
 import { valueOf } from './measured.js';
@@ -27,6 +29,8 @@ export interface DrawingOptions {
   readonly height?: number;
   /** The remedy to draw; unsaid, the foremost. */
   readonly remedy?: RemedyKind;
+  /** Kept while a point is dragged, so that the paper does not move under the hand. */
+  readonly frame?: Frame | undefined;
 }
 
 const USUAL_FRAME = { width: 620, height: 340 };
@@ -208,6 +212,8 @@ function legendOf(scene: Scene, units: Units): LegendItem[] {
   return [...holes, { role: 'final', layer: null, text }, ring];
 }
 
+const TOO_CLOSE_LEGEND: LegendItem = { role: 'tooClose', layer: null, text: TOO_CLOSE_WORDS };
+
 function handlesOf(scene: Scene): DrawnHandle[] {
   const { card } = scene;
   const offsets = card.layers.flatMap((layer, index): DrawnHandle[] => {
@@ -228,24 +234,6 @@ function handlesOf(scene: Scene): DrawnHandle[] {
     return { path: `layers.${layer}.${list}.${index}.distance`, kind, label, at: foot, along: angle };
   });
   return [...offsets, ...neighbours, ...straights];
-}
-
-const GRIDS: Readonly<Record<Units, readonly (readonly [number, string])[]>> = {
-  inch: [
-    [0.1, 'grid 0.100 in'],
-    [0.25, 'grid 0.250 in'],
-    [0.5, 'grid 0.500 in'],
-  ],
-  mm: [
-    [2 / MM_PER_INCH, 'grid 2 mm'],
-    [5 / MM_PER_INCH, 'grid 5 mm'],
-    [10 / MM_PER_INCH, 'grid 10 mm'],
-  ],
-};
-const GRID_LEAST_PIXELS = 14;
-
-function gridFor(frame: Frame, units: Units): readonly [number, string] {
-  return GRIDS[units].find(([grid]) => grid * frame.scale >= GRID_LEAST_PIXELS) ?? GRIDS[units].at(-1)!;
 }
 
 function beyondWords(scene: Scene, units: Units): string[] {
@@ -276,9 +264,10 @@ export function holeDrawing(
 ): HoleDrawing {
   const { units = 'inch', width = USUAL_FRAME.width, height = USUAL_FRAME.height } = options;
   const scene = sceneOf(card, check, options.remedy);
-  const frame = frameFor(extentOf(scene), width, height);
+  const frame = options.frame ?? frameFor(extentOf(scene), width, height);
   const holes = holeShapes(scene);
   const sheet = sheetFor(scene, frame, holes);
+  const tooClose = tooCloseShapes(scene, frameBox(frame));
   const [grid, gridText] = gridFor(frame, units);
   return {
     frame,
@@ -286,10 +275,11 @@ export function holeDrawing(
     gridText,
     shapes: [
       ...overlapArea(scene, frameBox(frame)),
+      ...tooClose,
       ...holes,
       ...dimensioned(sheet, scene, { units, isNarrow: width < NARROW }),
     ],
-    legend: legendOf(scene, units),
+    legend: [...legendOf(scene, units), ...(tooClose.length > 0 ? [TOO_CLOSE_LEGEND] : [])],
     handles: handlesOf(scene),
     beyond: beyondWords(scene, units),
   };

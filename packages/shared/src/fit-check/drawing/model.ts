@@ -11,8 +11,8 @@ interface OfLayer {
 
 export interface DrawnArea {
   readonly kind: 'area';
-  /** Where every layer lies over the others. */
-  readonly role: 'overlap';
+  /** Where every layer lies over the others; where a line may lie within its measuring error. */
+  readonly role: 'overlap' | 'tooClose';
   readonly points: readonly Point[];
 }
 export interface DrawnLine extends OfLayer {
@@ -23,7 +23,7 @@ export interface DrawnLine extends OfLayer {
 }
 export interface DrawnCircle extends OfLayer {
   readonly kind: 'circle';
-  readonly role: 'hole' | 'neighbour' | 'final' | 'ring';
+  readonly role: 'hole' | 'neighbour' | 'final' | 'ring' | 'tooClose';
   readonly centre: Point;
   readonly radius: number;
 }
@@ -71,7 +71,7 @@ export interface DrawnHandle {
 }
 
 export interface LegendItem {
-  readonly role: 'hole' | 'final' | 'ring';
+  readonly role: 'hole' | 'final' | 'ring' | 'tooClose';
   readonly layer: number | null;
   readonly text: string;
 }
