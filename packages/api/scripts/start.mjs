@@ -22,3 +22,8 @@ server.on('message', ({ listening, demo }) => {
 });
 server.on('exit', (code, signal) => process.exit(code ?? (signal ? 1 : 0)));
 for (const signal of ['SIGINT', 'SIGTERM']) process.on(signal, () => server.kill(signal));
+
+// npm runs this through a shell, and a shell that is told to stop tells nobody.
+const startedBy = process.ppid;
+if (process.env.npm_lifecycle_event)
+  setInterval(() => process.ppid === startedBy || server.kill('SIGTERM'), 500).unref();
