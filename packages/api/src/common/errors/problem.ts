@@ -92,15 +92,18 @@ export function statusOf(error: unknown): number {
 /** Nothing but our own words leaves: a message of a library may name a path, a statement or a line of code. */
 export function problemOf(error: unknown, instance: string): Problem {
   const status = statusOf(error);
-  const base = { type: 'about:blank', title: STATUS_CODES[status] ?? 'Error', status, instance };
-  if (!(error instanceof AppError))
-    return { ...base, detail: PLAIN[status] ?? PLAIN[status < 500 ? 400 : 500]! };
-  return {
-    ...base,
-    title: error.title,
-    detail: error.message,
-    ...(error instanceof BadInput ? { errors: error.faults } : {}),
-    ...(error instanceof NotReady ? { checks: error.checks } : {}),
-    ...(error instanceof Conflict && error.current ? { ...error.current, current: error.current } : {}),
-  };
+  if (!(error instanceof AppError)) {
+    const detail = PLAIN[status] ?? PLAIN[status < 500 ? 400 : 500]!;
+    return { type: 'about:blank', title: STATUS_CODES[status] ?? 'Error', status, detail, instance };
+  }
+  const { title, message: detail } = error;
+  // First, so that no fact named like a member of the problem takes its place.
+  return { ...factsOf(error), type: 'about:blank', title, status, detail, instance };
+}
+
+function factsOf(error: AppError): Record<string, unknown> {
+  if (error instanceof BadInput) return { errors: error.faults };
+  if (error instanceof NotReady) return { checks: error.checks };
+  if (error instanceof Conflict && error.current) return { ...error.current, current: error.current };
+  return {};
 }

@@ -41,6 +41,7 @@ export async function prepareHttp(app: NestFastifyApplication, settings: Setting
   const fastify = app.getHttpAdapter().getInstance();
   const known = KnownRoutes.listenTo(fastify);
   fastify.decorate('allowedAt', (url: string) => known.allowed(url));
+  fastify.removeContentTypeParser('text/plain');
   await app.register(cookie as never);
   await app.register(multipart as never, {
     limits: { fileSize: PHOTO_MAX_BYTES, files: 1, fields: 8, fieldSize: 2_000, parts: 9, headerPairs: 50 },

@@ -1,0 +1,15 @@
+import { requestIdOf } from './request-id.js';
+
+describe('requestIdOf', () => {
+  it('takes over the id of a proxy', () => {
+    expect(requestIdOf({ headers: { 'x-request-id': 'edge:7f-3.a_1' } })).toBe('edge:7f-3.a_1');
+  });
+
+  it.each(['', 'a b', 'x'.repeat(65), '{"a":1}', 'a\u0000b', 'a,b'])(
+    'makes its own in place of %j',
+    (given) => {
+      const id = requestIdOf({ headers: { 'x-request-id': given } });
+      expect(id).toMatch(/^[0-9a-f]{8}-[0-9a-f]{4}-7/);
+    },
+  );
+});
