@@ -1,3 +1,4 @@
+import { hash } from '@node-rs/argon2';
 import type { ChapterRole, Discipline, SiteRole, Units } from '@rivetside/shared';
 import type { UnitOfWork } from '../common/database/unit-of-work.js';
 import { newId } from '../common/ids.js';
@@ -20,7 +21,9 @@ export interface UserFacts {
   readonly email?: string;
   readonly units?: Units;
   readonly siteRole?: SiteRole;
-  readonly passwordHash?: string;
+  /** Signs in by this password too; without it only by `as`. */
+  readonly password?: string;
+  readonly disabledAt?: string;
   readonly emailConfirmedAt?: string | null;
   /** Member of this chapter; where only roles are given, of a new one. */
   readonly chapter?: { readonly id: string };
@@ -30,8 +33,10 @@ export interface UserFacts {
   readonly stampNumber?: string;
 }
 
-/** Matches no password: who signs in by password is made by signing up. */
+/** Matches no password. */
 const NO_PASSWORD = 'no password';
+/** As little work as argon2 does: what a hash costs is tested elsewhere. */
+const CHEAP = { memoryCost: 8, timeCost: 1, parallelism: 1 };
 
 /** Makes chapters and people; each stands alone unless told otherwise. */
 export class CreateAccount {
@@ -62,19 +67,8 @@ export class CreateAccount {
 
   async user(facts: UserFacts = {}): Promise<TestUser> {
     const at = this.clock.instant();
-    const number = (this.made += 1);
-    const user = Object.assign(new UserEntity(), {
-      id: newId(),
-      email: facts.email ?? `person${number}@test.example`,
-      name: facts.name ?? `Person ${number}`,
-      passwordHash: facts.passwordHash ?? NO_PASSWORD,
-      emailConfirmedAt: facts.emailConfirmedAt === undefined ? at : facts.emailConfirmedAt,
-      units: facts.units ?? ('inch' as const),
-      zone: 'Europe/London',
-      siteRole: facts.siteRole ?? null,
-      disabledAt: null,
-      createdAt: at,
-    });
+    const passwordHash = facts.password === undefined ? NO_PASSWORD : await hash(facts.password, CHEAP);
+    const user = Object.assign(userOf(facts, (this.made += 1), at), { passwordHash });
     const sessionId = newId();
     const session = { id: sessionId, userId: user.id, device: 'test', createdAt: at, lastUsedAt: at };
     await this.unitOfWork.run(async (tx) => {
@@ -101,4 +95,18 @@ export class CreateAccount {
     await this.unitOfWork.run((tx) => tx.manager.insert(MembershipEntity, membership));
     return membership;
   }
+}
+
+function userOf(facts: UserFacts, number: number, at: string): UserEntity {
+  return Object.assign(new UserEntity(), {
+    id: newId(),
+    email: facts.email ?? `person${number}@test.example`,
+    name: facts.name ?? `Person ${number}`,
+    emailConfirmedAt: facts.emailConfirmedAt === undefined ? at : facts.emailConfirmedAt,
+    units: facts.units ?? ('inch' as const),
+    zone: 'Europe/London',
+    siteRole: facts.siteRole ?? null,
+    disabledAt: facts.disabledAt ?? null,
+    createdAt: at,
+  });
 }

@@ -4,6 +4,7 @@ import type { Server } from 'node:http';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { NestFastifyApplication } from '@nestjs/platform-fastify';
+import { PinoLogger } from 'nestjs-pino';
 import supertest, { type Test } from 'supertest';
 import { AccessTokens } from '../common/access/access-tokens.js';
 import { readEnv } from '../common/config/env.js';
@@ -46,6 +47,8 @@ export async function startTestApp({ env = {}, ...parts }: TestAppOptions = {}):
   const defaults = { NODE_ENV: 'test', PORT: '0', DATA_DIR: dataDir, DEMO: '0', LOG_LEVEL: 'silent' };
   const settings = new Settings(readEnv({ ...defaults, ...env }));
   const clock = new TestClock();
+  // The logger is one for the whole process: a second app would keep the level of the first.
+  if (PinoLogger.root) PinoLogger.root.level = settings.env.LOG_LEVEL;
   const app = await createApp(settings, { ...parts, clock });
   await app.listen(0, '127.0.0.1');
   const server = app.getHttpServer() as unknown as Server;

@@ -8,7 +8,7 @@ describe('the settings as the app asks for them', () => {
   let folder: string;
   beforeEach(() => (folder = mkdtempSync(join(tmpdir(), 'rivetside-settings-'))));
   afterEach(() => rmSync(folder, { recursive: true, force: true }));
-  const settings = (given: Record<string, string> = {}) =>
+  const settings = (given: Record<string, string | undefined> = {}) =>
     new Settings(readEnv({ DATA_DIR: join(folder, 'data'), ...given }));
 
   it('say in a sentence that the data folder cannot be written', () => {
