@@ -4,6 +4,7 @@ import { OutboxEntity } from '../common/mail/outbox.entity.js';
 import { MailTokenEntity } from '../features/accounts/mail-token.entity.js';
 import { RefreshTokenEntity } from '../features/accounts/refresh-token.entity.js';
 import { SessionEntity } from '../features/accounts/session.entity.js';
+import { SignUpEntity } from '../features/accounts/sign-up.entity.js';
 import { UserEntity } from '../features/accounts/user.entity.js';
 import { BuildCrewEntity } from '../features/builds/build-crew.entity.js';
 import { BuildEntity } from '../features/builds/build.entity.js';
@@ -40,6 +41,7 @@ export const entities = [
   MailTokenEntity,
   RefreshTokenEntity,
   SessionEntity,
+  SignUpEntity,
   UserEntity,
   BuildCrewEntity,
   BuildEntity,

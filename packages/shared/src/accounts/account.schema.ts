@@ -25,7 +25,9 @@ export const nameSchema = z
   .trim()
   .min(2, 'Give your name as others know you.')
   .max(80, 'Keep the name under 80 characters.')
-  .regex(/^[^\p{Cc}\p{Zl}\p{Zp}<>]+$/u, 'A name has no line breaks or angle brackets.');
+  .regex(/^[^\p{Cc}\p{Zl}\p{Zp}<>]*$/u, 'A name has no line breaks or angle brackets.')
+  // It is read by others in mails and lists: nobody gets to put an advertisement there.
+  .refine((name) => !/:\/\/|www\./i.test(name), 'A name has no web address in it.');
 
 export const signUpSchema = z
   .strictObject({ email: emailSchema, password: newPasswordSchema, name: nameSchema })
@@ -117,6 +119,7 @@ export type Session = z.infer<typeof sessionSchema>;
 
 /** The same answer whether or not the address exists. */
 export const mailSentSchema = z.strictObject({ message: z.string() }).meta({ id: 'MailSent' });
+export type MailSent = z.infer<typeof mailSentSchema>;
 
 export const demoSignInSchema = z
   .strictObject({ email: z.string(), name: z.string(), as: z.string() })

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { Actor, ChapterRole, Discipline, Membership, SiteRole } from '@rivetside/shared';
 import { PreparedReader } from '../database/prepared-reader.js';
+import type { TokenClaims } from './access-tokens.js';
 
 const LIVE_SESSION = `SELECT u."id", u."name", u."siteRole" FROM "sessions" s JOIN "users" u ON u."id" = s."userId"
   WHERE s."id" = ? AND s."endedAt" IS NULL AND u."disabledAt" IS NULL`;
@@ -19,6 +20,12 @@ interface MembershipRow {
 @Injectable()
 export class ActorReader {
   constructor(private readonly reader: PreparedReader) {}
+
+  /** Null when the session has ended or is another's. */
+  ofClaims({ sid, sub }: TokenClaims): Actor | null {
+    const actor = this.ofSession(sid);
+    return actor?.id === sub ? actor : null;
+  }
 
   /** Null when the session has ended or the account is disabled. */
   ofSession(sessionId: string): Actor | null {

@@ -3,13 +3,7 @@ import { PassportStrategy } from '@nestjs/passport';
 import type { Actor } from '@rivetside/shared';
 import { ExtractJwt, Strategy } from 'passport-jwt';
 import { Settings } from '../config/settings.js';
-import {
-  TOKEN_ALGORITHM,
-  TOKEN_AUDIENCE,
-  TOKEN_ISSUER,
-  type TokenClaims,
-  tokenKey,
-} from './access-tokens.js';
+import { claimsOf, TOKEN_ALGORITHM, TOKEN_AUDIENCE, TOKEN_ISSUER, tokenKey } from './access-tokens.js';
 import { ActorReader } from './actor-reader.js';
 
 @Injectable()
@@ -28,8 +22,8 @@ export class JwtStrategy extends PassportStrategy(Strategy) {
     });
   }
 
-  validate(claims: TokenClaims): Actor | null {
-    const actor = typeof claims.sid === 'string' ? this.actors.ofSession(claims.sid) : null;
-    return actor?.id === claims.sub ? actor : null;
+  validate(payload: unknown): Actor | null {
+    const claims = claimsOf(payload);
+    return claims && this.actors.ofClaims(claims);
   }
 }

@@ -4,14 +4,17 @@ import type { AddressObject } from 'mailparser';
 import { Public } from '../access/access.decorator.js';
 import { Settings } from '../config/settings.js';
 import { NotFound } from '../errors/app-error.js';
-import { MailCatcher } from './mail-catcher.js';
+import { escapeHtml } from './escape-html.js';
+import { type CaughtMail, MailCatcher } from './mail-catcher.js';
 
-const escape = (text: string) => text.replace(/[&<>"']/g, (sign) => `&#${sign.charCodeAt(0)};`);
 const page = (title: string, body: string) =>
-  `<!doctype html><html lang="en"><head><meta charset="utf-8"><title>${escape(title)}</title></head><body><h1>${escape(title)}</h1>${body}</body></html>`;
+  `<!doctype html><html lang="en"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width"><title>${escapeHtml(title)}</title></head><body><h1>${escapeHtml(title)}</h1>${body}</body></html>`;
 /** Links in caught mails must be pressable: only those of plain http are made so. */
 const linked = (text: string) =>
-  escape(text).replace(/https?:\/\/[^\s&]+(?:&#38;[^\s&]+)*/g, (url) => `<a href="${url}">${url}</a>`);
+  escapeHtml(text).replace(
+    /https?:\/\/[^\s&]+(?:&#38;[^\s&]+)*/g,
+    (url) => `<a href="${url}" rel="noreferrer">${url}</a>`,
+  );
 const addressed = (to: AddressObject | AddressObject[] | undefined) =>
   [to ?? []]
     .flat()
@@ -30,29 +33,33 @@ export class DevMailController {
   @Get()
   @Public()
   @Header('content-type', 'text/html; charset=utf-8')
+  @Header('cache-control', 'no-store')
   list(): string {
-    const { mails } = this.found();
-    const rows = mails.map(
-      ({ subject = '', to }, at) =>
-        `<li><a href="/dev/mail/${at + 1}">${escape(subject)}</a> to ${escape(addressed(to))}</li>`,
+    const rows = this.caught().map(
+      ({ number, mail }) =>
+        `<li><a href="/dev/mail/${number}">${escapeHtml(mail.subject ?? '')}</a> to ${escapeHtml(addressed(mail.to))}, ${mail.date?.toISOString() ?? ''}</li>`,
     );
-    return page('Caught mails', rows.length ? `<ol>${rows.join('')}</ol>` : '<p>No mail yet.</p>');
+    const none = this.settings.env.SMTP_URL ? 'Mails go to SMTP_URL.' : 'No mail yet.';
+    return page('Caught mails', rows.length > 0 ? `<ul>${rows.join('')}</ul>` : `<p>${none}</p>`);
   }
 
   @Get(':number')
   @Public()
   @Header('content-type', 'text/html; charset=utf-8')
+  @Header('cache-control', 'no-store')
   one(@Param('number') number: string): string {
-    const mail = this.found().mails[Number(number) - 1];
-    if (!mail) throw new NotFound('mail');
+    const found = this.caught().find((caught) => String(caught.number) === number);
+    if (!found) throw new NotFound('mail');
+    const { mail } = found;
+    const html = typeof mail.html === 'string' ? mail.html : '';
     return page(
       mail.subject ?? '',
-      `<p>to ${escape(addressed(mail.to))}</p><pre>${linked(mail.text ?? '')}</pre>`,
+      `<p>to ${escapeHtml(addressed(mail.to))}</p><pre>${linked(mail.text ?? '')}</pre><details><summary>As HTML</summary><pre>${escapeHtml(html)}</pre></details><p><a href="/dev/mail">All caught mails</a></p>`,
     );
   }
 
-  private found(): MailCatcher {
+  private caught(): readonly CaughtMail[] {
     if (this.settings.production) throw new NotFound('page');
-    return this.catcher;
+    return this.catcher.caught;
   }
 }

@@ -1,5 +1,5 @@
 import { Injectable, type OnApplicationShutdown } from '@nestjs/common';
-import { createTransport, type Transporter } from 'nodemailer';
+import { createTransport, type SendMailOptions, type Transporter } from 'nodemailer';
 import { Settings } from '../config/settings.js';
 import { MailCatcher } from './mail-catcher.js';
 
@@ -15,23 +15,31 @@ export class MailTransport implements OnApplicationShutdown {
     private readonly catcher: MailCatcher,
   ) {}
 
-  /** Where mails go; null in production without SMTP_URL, where they wait. */
-  async open(): Promise<Transporter | null> {
-    if (this.transporter) return this.transporter;
-    const url =
-      this.settings.env.SMTP_URL ?? (this.settings.production ? null : await this.catcher.address());
-    if (!url) return null;
-    this.transporter = createTransport({
-      url,
-      connectionTimeout: PATIENCE_MS,
-      greetingTimeout: PATIENCE_MS,
-      socketTimeout: PATIENCE_MS,
-      dnsTimeout: PATIENCE_MS,
-    } as object);
-    return this.transporter;
+  /** False in production without SMTP_URL, where mails wait. */
+  get leadsSomewhere(): boolean {
+    return this.settings.env.SMTP_URL !== undefined || !this.settings.production;
+  }
+
+  /** Rejects where the server does not take it. */
+  async send(mail: SendMailOptions): Promise<void> {
+    this.transporter ??= await this.open();
+    await this.transporter.sendMail(mail);
   }
 
   onApplicationShutdown(): void {
     this.transporter?.close();
+  }
+
+  private async open(): Promise<Transporter> {
+    return createTransport({
+      url: this.settings.env.SMTP_URL ?? (await this.catcher.address()),
+      connectionTimeout: PATIENCE_MS,
+      greetingTimeout: PATIENCE_MS,
+      socketTimeout: PATIENCE_MS,
+      dnsTimeout: PATIENCE_MS,
+      // A mail carries what we wrote and nothing from disk or wire.
+      disableFileAccess: true,
+      disableUrlAccess: true,
+    } as object);
   }
 }

@@ -44,15 +44,30 @@ export class Realtime {
     this.server?.to(rooms).emit('question.changed', change);
   }
 
-  /** Tells the session why and closes its sockets. */
+  /** Tells the session why and closes its sockets, in every process. */
   endSession(sessionId: string, reason: string): void {
     const room = this.server?.in(sessionRoom(sessionId));
     room?.emit('session:ended', { reason });
     room?.disconnectSockets(true);
   }
 
-  /** A changed role is asked for again at the door: everyone concerned comes in anew. */
-  reconnectUser(userId: string): void {
-    this.server?.in(userRoom(userId)).disconnectSockets(true);
+  /** The sockets of this process. */
+  socketsHere(): LiveSocket[] {
+    return [...(this.server?.sockets.values() ?? [])];
   }
+
+  /** Puts out whose session has ended. Whose rights have changed comes in anew: every door asks again. */
+  standingOf(socket: LiveSocket, actor: Actor | null): void {
+    if (!actor) {
+      socket.emit('session:ended', { reason: 'This session has ended.' });
+      socket.disconnect(true);
+    } else if (rightsOf(actor) !== rightsOf(socket.data.actor)) {
+      // As if the line had broken: the client connects again by itself and catches up.
+      socket.conn.close();
+    }
+  }
+}
+
+function rightsOf({ siteRole, memberships }: Actor): string {
+  return JSON.stringify([siteRole, memberships]);
 }

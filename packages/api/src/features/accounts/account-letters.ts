@@ -6,11 +6,12 @@ interface To {
   readonly name: string;
 }
 
-export const confirmLetter = ({ email, name }: To, url: string): Mail =>
+/** Without the name: it goes to an address that anybody may have typed, with whatever they typed as a name. */
+export const confirmLetter = ({ email }: To, url: string): Mail =>
   letter({
     to: email,
     subject: 'Confirm your address',
-    greeting: `Hello ${name},`,
+    greeting: 'Hello,',
     lines: [
       'Press once and your Rivetside account is open. The link works for two days.',
       'If you did not sign up, leave it.',
@@ -51,7 +52,7 @@ export const changeEmailLetter = ({ email, name }: To, url: string): Mail =>
     action: { label: 'Use this address', url },
   });
 
-export const passwordChangedLetter = ({ email, name }: To): Mail =>
+export const passwordChangedLetter = ({ email, name }: To, url: string): Mail =>
   letter({
     to: email,
     subject: 'Your password was changed',
@@ -59,5 +60,17 @@ export const passwordChangedLetter = ({ email, name }: To): Mail =>
     lines: [
       'Your password was changed and every other device was signed out.',
       'If that was not you, set a new password at once.',
+    ],
+    action: { label: 'Set a new password', url },
+  });
+
+export const emailChangedLetter = ({ email, name }: To): Mail =>
+  letter({
+    to: email,
+    subject: 'Your account has a new address',
+    greeting: `Hello ${name},`,
+    lines: [
+      'Your account uses another e-mail address now, and this one no longer.',
+      'If that was not you, tell the admin of your chapter at once.',
     ],
   });

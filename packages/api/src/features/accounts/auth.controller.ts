@@ -18,25 +18,32 @@ import {
 import type { FastifyReply, FastifyRequest } from 'fastify';
 import { Public } from '../../common/access/access.decorator.js';
 import { AuthService } from './auth.service.js';
+import { LinksService } from './links.service.js';
 
 @ApiTags('sign-in')
 @Controller('auth')
 export class AuthController {
-  constructor(private readonly auth: AuthService) {}
+  constructor(
+    private readonly auth: AuthService,
+    private readonly links: LinksService,
+  ) {}
 
   @Post('sign-up')
   @HttpCode(202)
   @Public()
   @ApiAcceptedResponse({ standardSchema: mailSentSchema })
   signUp(@Body({ schema: signUpSchema }) input: SignUp, @Req() request: FastifyRequest) {
-    return this.auth.signUp(input, request.ip);
+    return this.links.signUp(input, request.ip);
   }
 
   @Post('confirm-email')
   @HttpCode(204)
   @Public()
-  confirmEmail(@Body({ schema: confirmEmailSchema }) { token }: ConfirmEmail): Promise<void> {
-    return this.auth.confirmEmail(token);
+  confirmEmail(
+    @Body({ schema: confirmEmailSchema }) { token }: ConfirmEmail,
+    @Req() request: FastifyRequest,
+  ): Promise<void> {
+    return this.links.confirmEmail(token, request.ip);
   }
 
   @Post('sign-in')
@@ -77,13 +84,16 @@ export class AuthController {
     @Body({ schema: forgotPasswordSchema }) input: ForgotPassword,
     @Req() request: FastifyRequest,
   ) {
-    return this.auth.forgotPassword(input, request.ip);
+    return this.links.forgotPassword(input, request.ip);
   }
 
   @Post('reset-password')
   @HttpCode(204)
   @Public()
-  resetPassword(@Body({ schema: resetPasswordSchema }) input: ResetPassword): Promise<void> {
-    return this.auth.resetPassword(input);
+  resetPassword(
+    @Body({ schema: resetPasswordSchema }) input: ResetPassword,
+    @Req() request: FastifyRequest,
+  ): Promise<void> {
+    return this.links.resetPassword(input, request.ip);
   }
 }

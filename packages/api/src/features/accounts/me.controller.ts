@@ -1,5 +1,5 @@
 import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post } from '@nestjs/common';
-import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import { ApiAcceptedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import {
   type Actor as ActorType,
   type ChangeEmail,
@@ -8,6 +8,8 @@ import {
   changeMeSchema,
   type ChangePassword,
   changePasswordSchema,
+  type MailSent,
+  mailSentSchema,
   type Me,
   meSchema,
   pageOf,
@@ -16,6 +18,7 @@ import {
 } from '@rivetside/shared';
 import { Access, Actor } from '../../common/access/access.decorator.js';
 import { UuidPipe } from '../../common/http/uuid.pipe.js';
+import { CredentialsService } from './credentials.service.js';
 import { MeService } from './me.service.js';
 import { SessionsService } from './sessions.service.js';
 
@@ -24,6 +27,7 @@ import { SessionsService } from './sessions.service.js';
 export class MeController {
   constructor(
     private readonly me: MeService,
+    private readonly credentials: CredentialsService,
     private readonly sessions: SessionsService,
   ) {}
 
@@ -48,17 +52,18 @@ export class MeController {
     @Actor() actor: ActorType,
     @Body({ schema: changePasswordSchema }) input: ChangePassword,
   ): Promise<void> {
-    return this.me.changePassword(actor, input);
+    return this.credentials.changePassword(actor, input);
   }
 
   @Post('email')
   @HttpCode(202)
   @Access('authenticated')
+  @ApiAcceptedResponse({ standardSchema: mailSentSchema })
   changeEmail(
     @Actor() actor: ActorType,
     @Body({ schema: changeEmailSchema }) input: ChangeEmail,
-  ): Promise<void> {
-    return this.me.changeEmail(actor, input);
+  ): Promise<MailSent> {
+    return this.credentials.changeEmail(actor, input);
   }
 
   @Get('sessions')
@@ -66,6 +71,13 @@ export class MeController {
   @ApiOkResponse({ standardSchema: pageOf(sessionSchema) })
   listSessions(@Actor() actor: ActorType): { items: Session[]; nextCursor: null } {
     return { items: this.sessions.list(actor), nextCursor: null };
+  }
+
+  @Delete('sessions')
+  @HttpCode(204)
+  @Access('authenticated')
+  endOtherSessions(@Actor() actor: ActorType): Promise<void> {
+    return this.sessions.endOthers(actor);
   }
 
   @Delete('sessions/:id')

@@ -1,11 +1,10 @@
 import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { hash, verify } from '@node-rs/argon2';
-import { dictionary } from '@zxcvbn-ts/language-common';
 import { BadInput } from '../../common/errors/app-error.js';
+import { isGuessable } from './password-guesses.js';
 
 /** argon2id with 19 MiB, two passes, one lane: the first choice of the OWASP password storage sheet. */
 const OWASP = { memoryCost: 19_456, timeCost: 2, parallelism: 1 } as const;
-const COMMON = new Set<string>(dictionary['passwords-common'] as string[]);
 
 @Injectable()
 export class Passwords implements OnModuleInit {
@@ -15,6 +14,7 @@ export class Passwords implements OnModuleInit {
     this.nobodys = await this.hash('nobody has this password');
   }
 
+  /** Takes a few tens of milliseconds and 19 MiB: never inside a unit of work. */
   hash(password: string): Promise<string> {
     return hash(password, OWASP);
   }
@@ -25,13 +25,9 @@ export class Passwords implements OnModuleInit {
     return matched && passwordHash !== null;
   }
 
-  /** Refuses what is on every list of guesses, or says the address or the name. */
+  /** Refuses what is on every list of guesses, or says no more than the address or the name. */
   refuseCommon(password: string, path: string, about: readonly string[]): void {
-    const lower = password.toLowerCase();
-    const told = about.some(
-      (one) => one.length >= 4 && lower.includes(one.toLowerCase()) && password.length < one.length + 6,
-    );
-    if (told || COMMON.has(lower) || /^(.)\1+$/.test(password))
+    if (isGuessable(password, about))
       throw new BadInput([
         { path, message: 'This password is among the first that are guessed: choose another.' },
       ]);
