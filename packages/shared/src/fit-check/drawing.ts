@@ -214,24 +214,33 @@ function legendOf(scene: Scene, units: Units): LegendItem[] {
 
 const TOO_CLOSE_LEGEND: LegendItem = { role: 'tooClose', layer: null, text: TOO_CLOSE_WORDS };
 
+function fromOrigin(at: Point): Pick<DrawnHandle, 'at' | 'measured' | 'along'> {
+  return { at, measured: Math.hypot(at.x, at.y), along: null };
+}
+
 function handlesOf(scene: Scene): DrawnHandle[] {
   const { card } = scene;
   const offsets = card.layers.flatMap((layer, index): DrawnHandle[] => {
     if (index === 0 || !layer.hole) return [];
     const label = `Hole in ${layerName(card, index)}`;
-    return [
-      { path: `layers.${index}.offset`, kind: 'offset', label, at: scene.centres[index]!, along: null },
-    ];
+    return [{ path: `layers.${index}.offset`, kind: 'offset', label, ...fromOrigin(scene.centres[index]!) }];
   });
   const neighbours = nearNeighbours(scene).map(({ index, at }): DrawnHandle => {
     const name = neighbourName(card, index);
     const label = `${name[0]!.toUpperCase()}${name.slice(1)}`;
-    return { path: `neighbours.${index}`, kind: 'neighbour', label, at, along: null };
+    return { path: `neighbours.${index}`, kind: 'neighbour', label, ...fromOrigin(at) };
   });
-  const straights = scene.straights.map(({ layer, index, kind, angle, foot }): DrawnHandle => {
+  const straights = scene.straights.map(({ layer, index, kind, angle, foot, measured }): DrawnHandle => {
     const list = kind === 'edge' ? 'edges' : 'bends';
     const label = `${kind === 'edge' ? 'Edge' : 'Bend'} of ${layerName(card, layer)}, ${directionName(angle)}`;
-    return { path: `layers.${layer}.${list}.${index}.distance`, kind, label, at: foot, along: angle };
+    return {
+      path: `layers.${layer}.${list}.${index}.distance`,
+      kind,
+      label,
+      at: foot,
+      measured,
+      along: angle,
+    };
   });
   return [...offsets, ...neighbours, ...straights];
 }

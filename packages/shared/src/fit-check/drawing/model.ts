@@ -66,6 +66,8 @@ export interface DrawnHandle {
   readonly kind: 'offset' | 'neighbour' | 'edge' | 'bend';
   readonly label: string;
   readonly at: Point;
+  /** The length that it stands for, inch: edges and bends from their layer's own hole, the others from the first. */
+  readonly measured: number;
   /** Edges and bends move along this direction alone, degrees; the others freely. */
   readonly along: number | null;
 }
