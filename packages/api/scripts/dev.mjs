@@ -2,12 +2,12 @@
 import { spawn } from 'node:child_process';
 import { existsSync } from 'node:fs';
 import { join } from 'node:path';
-import { bin, buildServer, checkNode, installWhenNeeded, root } from './prepare.mjs';
+import { bin, buildServerWhenStale, checkNode, installWhenNeeded, root } from './prepare.mjs';
 
 checkNode();
 installWhenNeeded();
 // Once before the server starts: it would find nothing to run.
-buildServer();
+buildServerWhenStale();
 
 const commands = {
   types: 'tsc -b packages/shared packages/api --watch --preserveWatchOutput',

@@ -1,7 +1,7 @@
 // What start and dev have in common. No packages: there may be none yet.
 import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { existsSync, readdirSync, readFileSync, statSync, writeFileSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, statSync, utimesSync, writeFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
@@ -72,10 +72,18 @@ export function isStale(built, sources) {
   return sources.some((source) => newestBelow(source) > at);
 }
 
-/** The compiler knows by itself what is stale; asking it costs a second. */
-export function buildServer() {
+/** The compiler knows by itself what is stale, but asking it costs seconds at every start. */
+export function buildServerWhenStale() {
+  const stamp = inRoot('packages/api/dist/.built');
+  const sources = ['shared/src', 'shared/tsconfig.json', 'api/src', 'api/tsconfig.json'];
+  const others = [inRoot('tsconfig.base.json'), inRoot('package-lock.json')];
+  if (!isStale(stamp, [...sources.map((source) => inRoot('packages', source)), ...others])) return;
+  const began = new Date();
   if (run(process.execPath, [inRoot('node_modules/typescript/bin/tsc'), '-b', 'packages/api']) !== 0)
     refuse('The server does not compile: see above.');
+  writeFileSync(stamp, '');
+  // What was saved while it compiled is newer than that.
+  utimesSync(stamp, began, began);
 }
 
 export function buildPageWhenStale() {

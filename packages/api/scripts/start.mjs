@@ -1,11 +1,11 @@
 // One command from a fresh clone: installs, builds what is stale, starts, and says where to look.
 import { fork } from 'node:child_process';
 import { join } from 'node:path';
-import { buildPageWhenStale, buildServer, checkNode, installWhenNeeded, root } from './prepare.mjs';
+import { buildPageWhenStale, buildServerWhenStale, checkNode, installWhenNeeded, root } from './prepare.mjs';
 
 checkNode();
 installWhenNeeded();
-buildServer();
+buildServerWhenStale();
 buildPageWhenStale();
 
 const server = fork(join(root, 'packages/api/dist/main.js'), { cwd: root, stdio: 'inherit' });

@@ -5,9 +5,6 @@ import { Logger } from '@nestjs/common';
 import type { NestFastifyApplication } from '@nestjs/platform-fastify';
 import { readEnv, SettingsFault } from './common/config/env.js';
 import { Settings } from './common/config/settings.js';
-import { createApp } from './create-app.js';
-import { DEMO_PASSWORD, DemoService } from './features/demo/demo.service.js';
-import { DemoLoader } from './seed/demo-loader.js';
 
 const WEB_ROOT = fileURLToPath(new URL('../../web/dist', import.meta.url));
 const STOP_MS = 10_000;
@@ -61,19 +58,29 @@ function reportForgotten(): void {
   process.on('unhandledRejection', (error) => logger.error({ err: error }, 'a failure nobody waited for'));
 }
 
+/** The demo world where there is nothing yet, and who may be signed in as. */
+async function prepareDemo(app: NestFastifyApplication, settings: Settings) {
+  if (!settings.demo) return null;
+  const { DemoLoader } = await import('./seed/demo-loader.js');
+  const { DEMO_PASSWORD, DemoService } = await import('./features/demo/demo.service.js');
+  if (settings.writes) await app.get(DemoLoader).loadIntoEmpty();
+  return { password: DEMO_PASSWORD, people: app.get(DemoService).signIns() };
+}
+
 async function start(): Promise<void> {
   let port = 3000;
   try {
     const settings = new Settings(readEnv(process.env));
     port = settings.env.PORT;
+    // Loaded after the settings are found good: it takes a second or two, and a fault is told at once.
+    const { createApp } = await import('./create-app.js');
     const app = await createApp(settings, existsSync(WEB_ROOT) ? { webRoot: WEB_ROOT } : {});
     reportForgotten();
     stopOnSignals(app);
     await app.init();
-    if (settings.demo && settings.writes) await app.get(DemoLoader).loadIntoEmpty();
+    const demo = await prepareDemo(app, settings);
     await app.listen(port, settings.env.HOST);
     logger.log({ port, role: settings.env.ROLE }, 'listening');
-    const demo = settings.demo ? { password: DEMO_PASSWORD, people: app.get(DemoService).signIns() } : null;
     process.send?.({ listening: port === 0 ? await app.getUrl() : settings.publicUrl, demo });
   } catch (error) {
     process.stderr.write(`${sentencesOf(error, port).join('\n')}\n`);
