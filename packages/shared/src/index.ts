@@ -47,3 +47,4 @@ export * from './fit-check/drawing/model.js';
 export * from './fit-check/drawing/description.js';
 export * from './fit-check/drawing.js';
 export { halfHole } from './fit-check/card-faults.js';
+export * from './chapters/chapter-policies.js';

@@ -20,6 +20,7 @@ export const pageQueryShape = {
   cursor: z.string().min(1).max(500).optional(),
 };
 export const pageQuerySchema = z.strictObject(pageQueryShape);
+export type PageAsked = z.infer<typeof pageQuerySchema>;
 
 /** The answer of every list. */
 export function pageOf<T extends z.ZodType>(item: T) {

@@ -1,4 +1,4 @@
-import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post } from '@nestjs/common';
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiAcceptedResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import {
   type Actor as ActorType,
@@ -12,7 +12,10 @@ import {
   mailSentSchema,
   type Me,
   meSchema,
+  type Page,
+  type PageAsked,
   pageOf,
+  pageQuerySchema,
   type Session,
   sessionSchema,
 } from '@rivetside/shared';
@@ -69,8 +72,11 @@ export class MeController {
   @Get('sessions')
   @Access('authenticated')
   @ApiOkResponse({ standardSchema: pageOf(sessionSchema) })
-  listSessions(@Actor() actor: ActorType): { items: Session[]; nextCursor: null } {
-    return { items: this.sessions.list(actor), nextCursor: null };
+  listSessions(
+    @Actor() actor: ActorType,
+    @Query({ schema: pageQuerySchema }) page: PageAsked,
+  ): Page<Session> {
+    return this.sessions.list(actor, page);
   }
 
   @Delete('sessions')

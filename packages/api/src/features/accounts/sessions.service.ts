@@ -1,7 +1,8 @@
 import { Injectable } from '@nestjs/common';
-import type { Actor, Session } from '@rivetside/shared';
+import { type Actor, type Page, PAGE_MAX, type PageAsked, type Session } from '@rivetside/shared';
 import { IsNull } from 'typeorm';
 import { writeAudit } from '../../common/audit/audit.js';
+import { decodeCursor, pageOfRows } from '../../common/database/cursor.js';
 import { PreparedReader } from '../../common/database/prepared-reader.js';
 import { type Tx, UnitOfWork } from '../../common/database/unit-of-work.js';
 import { NotFound, NotSignedIn } from '../../common/errors/app-error.js';
@@ -20,7 +21,12 @@ export const REFRESH_DAYS = 30;
 /** However much it is used. */
 export const SESSION_DAYS = 90;
 const OPEN_OF_USER = `SELECT "id", "createdAt", "lastUsedAt", "device" FROM "sessions"
-  WHERE "userId" = ? AND "endedAt" IS NULL AND "lastUsedAt" > ? AND "createdAt" > ? ORDER BY "lastUsedAt" DESC`;
+  WHERE "userId" = ? AND "endedAt" IS NULL AND "lastUsedAt" > ? AND "createdAt" > ?
+    AND ("lastUsedAt", "id") < (?, ?) ORDER BY "lastUsedAt" DESC, "id" DESC LIMIT ?`;
+/** Sorts after every instant. */
+const NEWEST = ['9999', ''];
+
+type SessionRow = Omit<Session, 'current'>;
 
 export interface OpenedSession {
   readonly userId: string;
@@ -100,11 +106,18 @@ export class SessionsService {
     });
   }
 
-  list(actor: Actor): Session[] {
-    const usedSince = this.daysAgo(REFRESH_DAYS);
-    return this.reader
-      .all<Omit<Session, 'current'>>(OPEN_OF_USER, [actor.id, usedSince, this.daysAgo(SESSION_DAYS)])
-      .map((row) => ({ ...row, current: row.id === actor.sessionId }));
+  /** The last used first. */
+  list(actor: Actor, { limit = PAGE_MAX, cursor }: PageAsked): Page<Session> {
+    const [lastUsedAt, id] = cursor === undefined ? NEWEST : decodeCursor(cursor);
+    const since = [this.daysAgo(REFRESH_DAYS), this.daysAgo(SESSION_DAYS)];
+    const after = [String(lastUsedAt), String(id ?? '')];
+    const rows = this.reader.all<SessionRow>(OPEN_OF_USER, [actor.id, ...since, ...after, limit + 1]);
+    return pageOfRows(
+      rows,
+      limit,
+      (row) => ({ ...row, current: row.id === actor.sessionId }),
+      (row) => [row.lastUsedAt, row.id],
+    );
   }
 
   async end(actor: Actor, id: string): Promise<void> {

@@ -1,4 +1,4 @@
-import { Controller, Get, Param } from '@nestjs/common';
+import { Controller, Get, Param, Query } from '@nestjs/common';
 import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import {
   type Actor as ActorType,
@@ -6,7 +6,10 @@ import {
   type ChapterMember,
   chapterMemberSchema,
   chapterSchema,
+  type Page,
+  type PageAsked,
   pageOf,
+  pageQuerySchema,
 } from '@rivetside/shared';
 import { Access, Actor } from '../../common/access/access.decorator.js';
 import { UuidPipe } from '../../common/http/uuid.pipe.js';
@@ -20,8 +23,8 @@ export class ChaptersController {
   @Get()
   @Access('authenticated')
   @ApiOkResponse({ standardSchema: pageOf(chapterSchema) })
-  list(@Actor() actor: ActorType): { items: Chapter[]; nextCursor: null } {
-    return { items: this.chapters.list(actor), nextCursor: null };
+  list(@Actor() actor: ActorType, @Query({ schema: pageQuerySchema }) page: PageAsked): Page<Chapter> {
+    return this.chapters.list(actor, page);
   }
 
   @Get(':id')
@@ -37,7 +40,8 @@ export class ChaptersController {
   members(
     @Actor() actor: ActorType,
     @Param('id', UuidPipe) id: string,
-  ): { items: ChapterMember[]; nextCursor: null } {
-    return { items: this.chapters.members(actor, id), nextCursor: null };
+    @Query({ schema: pageQuerySchema }) page: PageAsked,
+  ): Page<ChapterMember> {
+    return this.chapters.members(actor, id, page);
   }
 }
