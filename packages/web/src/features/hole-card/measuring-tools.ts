@@ -9,7 +9,7 @@ export const TOOL_WORDS: Readonly<Record<Tool, string>> = {
   rule: 'steel rule',
   pins: 'pins',
   photo: 'photo',
-  none: 'no error told',
+  none: 'no error',
 };
 
 /** Its usual measuring error, inch; null where none is told. */

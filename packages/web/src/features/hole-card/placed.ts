@@ -4,11 +4,11 @@ import type { Readings } from './readings';
 import { asMeasured } from './typed-length';
 
 export const PLACED_WORDS: Readonly<Record<PlacedBy, string>> = {
-  right: 'along the row, to the right',
-  above: 'square to the row, upward',
-  left: 'along the row, to the left',
-  below: 'square to the row, downward',
-  xy: 'both: along and across',
+  right: 'right, along the row',
+  above: 'up, square to row',
+  left: 'left, along the row',
+  below: 'down, square to row',
+  xy: 'along and across',
 };
 
 const TOWARD: Readonly<Record<Exclude<PlacedBy, 'xy'>, readonly [number, number]>> = {
