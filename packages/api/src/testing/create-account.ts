@@ -43,9 +43,13 @@ export class CreateAccount {
   private made = 0;
 
   constructor(
-    private readonly unitOfWork: UnitOfWork,
-    private readonly clock: Clock,
+    protected readonly unitOfWork: UnitOfWork,
+    protected readonly clock: Clock,
   ) {}
+
+  protected async insert<T extends object>(entity: new () => T, row: T): Promise<void> {
+    await this.unitOfWork.run((tx) => tx.manager.insert(entity, row as never));
+  }
 
   async chapter(facts: Partial<ChapterEntity> = {}): Promise<ChapterEntity> {
     const number = (this.made += 1);

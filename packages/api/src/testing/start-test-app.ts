@@ -11,7 +11,7 @@ import { readEnv } from '../common/config/env.js';
 import { Settings } from '../common/config/settings.js';
 import { UnitOfWork } from '../common/database/unit-of-work.js';
 import { createApp } from '../create-app.js';
-import { CreateAccount } from './create-account.js';
+import { CreateQuestion } from './create-question.js';
 import { TestClock } from './test-clock.js';
 
 type Method = 'get' | 'post' | 'put' | 'patch' | 'delete';
@@ -23,7 +23,7 @@ export interface TestApp {
   readonly server: Server;
   readonly settings: Settings;
   readonly clock: TestClock;
-  readonly create: CreateAccount;
+  readonly create: CreateQuestion;
   readonly guest: TestClient;
   /** Somebody signed in; made by `create.user`. */
   as(user: { readonly id: string; readonly sessionId: string }): TestClient;
@@ -55,14 +55,16 @@ export async function startTestApp({ env = {}, ...parts }: TestAppOptions = {}):
   const tokenOf = (user: { id: string; sessionId: string }) =>
     app.get(AccessTokens).issue(user.id, user.sessionId);
 
+  const as = (user: { id: string; sessionId: string }) => clientOf(server, tokenOf(user));
+
   return {
     app,
     server,
     settings,
     clock,
-    create: new CreateAccount(app.get(UnitOfWork), clock),
+    create: new CreateQuestion(app.get(UnitOfWork), clock, as),
     guest: clientOf(server, null),
-    as: (user) => clientOf(server, tokenOf(user)),
+    as,
     tokenOf,
     stop: async () => {
       await app.close();

@@ -18,6 +18,9 @@ export const buildSchema = z
   .meta({ id: 'Build' });
 export type Build = z.infer<typeof buildSchema>;
 
+export const entryLineSchema = z.strictObject({ label: z.string(), text: z.string() });
+export type EntryLine = z.infer<typeof entryLineSchema>;
+
 export const ENTRY_KINDS = ['work', 'fix', 'visit', 'closeUp'] as const;
 export const entrySchema = z
   .strictObject({
@@ -30,7 +33,7 @@ export const entrySchema = z
     questionNumber: z.string().nullable(),
     title: z.string(),
     /** found, did, basis, used, measured … as written when it was done */
-    lines: z.array(z.strictObject({ label: z.string(), text: z.string() })),
+    lines: z.array(entryLineSchema),
     minutes: z.number().int().nullable(),
     by: personSchema,
     helpers: z.array(z.string()),

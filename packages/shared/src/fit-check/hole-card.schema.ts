@@ -155,3 +155,7 @@ export const asDoneCheckSchema = z
   })
   .meta({ id: 'AsDoneCheck' });
 export type AsDoneCheck = z.infer<typeof asDoneCheckSchema>;
+
+/** What is sent to be checked, and nothing else. */
+export const askFitCheckSchema = z.strictObject({ holeCard: holeCardSchema }).meta({ id: 'AskFitCheck' });
+export type AskFitCheck = z.infer<typeof askFitCheckSchema>;

@@ -90,6 +90,11 @@ export function canWithdrawStamp(actor: Actor, stamp: { readonly byId: string })
   return stamp.byId === actor.id || actor.siteRole === 'steward';
 }
 
+/** Another look at a held stamp is for whoever gave it. */
+export function canReviewStamp(actor: Actor, stamp: { readonly byId: string }): boolean {
+  return stamp.byId === actor.id;
+}
+
 /** The builder carries out: the asker, or owner and crew of the build. */
 export function canCarryOut(actor: Actor, question: QuestionStanding): boolean {
   return question.askedById === actor.id || question.builderIds.includes(actor.id);

@@ -198,6 +198,7 @@ export const SHEET_EVENTS = [
   'endorsementWithdrawn',
   'endorsementHeld',
   'endorsementReviewed',
+  'endorsementExpired',
   'objection',
   'objectionAnswered',
   'completion',
@@ -317,7 +318,20 @@ export const eventsAnswerSchema = z
   })
   .meta({ id: 'SheetEvents' });
 
+export type SheetEvents = z.infer<typeof eventsAnswerSchema>;
+
 export const seenSchema = z.strictObject({ seq: z.number().int().min(0) }).meta({ id: 'Seen' });
+export type Seen = z.infer<typeof seenSchema>;
+
+/** What waits for a mentor: a first fix, a stamp, another look at what was held. */
+export const deskSchema = z
+  .strictObject({
+    firstFix: z.array(questionRowSchema),
+    stamp: z.array(questionRowSchema),
+    review: z.array(questionRowSchema),
+  })
+  .meta({ id: 'Desk' });
+export type Desk = z.infer<typeof deskSchema>;
 
 export const similarQuerySchema = z
   .strictObject({
@@ -328,6 +342,15 @@ export const similarQuerySchema = z
   })
   .meta({ id: 'SimilarQuery' });
 export type SimilarQuery = z.infer<typeof similarQuerySchema>;
+
+/** The same as an address: beside a question, or for a place and words. */
+export const similarAskedSchema = z.strictObject({
+  questionId: idSchema.optional(),
+  sectionId: idSchema.optional(),
+  partId: idSchema.optional(),
+  text: z.string().trim().max(500).optional(),
+});
+export type SimilarAsked = z.infer<typeof similarAskedSchema>;
 
 /** A question met before. Why it is shown is said in words; nothing is ranked by a number on screen. */
 export const similarQuestionSchema = z

@@ -12,4 +12,9 @@ describe('requestIdOf', () => {
       expect(id).toMatch(/^[0-9a-f]{8}-[0-9a-f]{4}-7/);
     },
   );
+
+  it('makes a new one each time', () => {
+    const ids = Array.from({ length: 100 }, () => requestIdOf({ headers: {} }));
+    expect(new Set(ids).size).toBe(100);
+  });
 });

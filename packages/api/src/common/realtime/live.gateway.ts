@@ -40,6 +40,7 @@ export class LiveGateway implements OnGatewayInit, OnGatewayConnection {
       }
       socket.data.actor = actor;
       socket.data.sheets = new Set();
+      socket.data.writing = {};
       boundWhatIsSaid(socket);
       next();
     });

@@ -13,6 +13,8 @@ export interface LiveData {
   actor: Actor;
   /** Sheets whose door this socket came through. */
   sheets: Set<string>;
+  /** Until when they count as writing, by question; milliseconds since 1970. */
+  writing: Record<string, number>;
 }
 export type LiveServer = Namespace<ClientToServer, ServerToClient, Record<string, never>, LiveData>;
 export type LiveSocket = Socket<ClientToServer, ServerToClient, Record<string, never>, LiveData>;
@@ -36,8 +38,16 @@ export class Realtime {
     this.server?.to(sheetRoom(event.questionId)).emit('sheet:event', event);
   }
 
-  presence(presence: SheetPresence): void {
-    this.server?.to(sheetRoom(presence.questionId)).emit('sheet:presence', presence);
+  /** Says to a sheet who has it open, in whichever process; somebody with several tabs is there once. */
+  async tellPresence(questionId: string): Promise<void> {
+    const room = this.server?.in(sheetRoom(questionId));
+    const people = new Map<string, SheetPresence['people'][number]>();
+    for (const { data } of (await room?.fetchSockets()) ?? []) {
+      const { id, name } = data.actor;
+      const writes = (data.writing[questionId] ?? 0) > Date.now();
+      people.set(id, { userId: id, name, writing: writes || (people.get(id)?.writing ?? false) });
+    }
+    if (people.size > 0) room?.emit('sheet:presence', { questionId, people: [...people.values()] });
   }
 
   questionChanged(rooms: string[], change: QuestionChanged): void {

@@ -260,6 +260,7 @@ const TABLES = [
       "heldByNoticeId" varchar,
       "withdrawnAt" varchar,
       "withdrawnReason" text,
+      "expiredAt" varchar,
       "reviews" text NOT NULL,
       CONSTRAINT "FK_0232c96594b0e9b47f0cea7c4d4" FOREIGN KEY ("fixId") REFERENCES "fixes" ("id") ON DELETE NO ACTION ON UPDATE NO ACTION,
       CONSTRAINT "FK_1bbe2b07abcedef632de515dcc9" FOREIGN KEY ("questionId") REFERENCES "questions" ("id") ON DELETE NO ACTION ON UPDATE NO ACTION,

@@ -65,6 +65,10 @@ export class EndorsementEntity {
   @Column('text', { nullable: true })
   withdrawnReason!: string | null;
 
+  /** When its running out was told to those who relied on it. */
+  @Column('varchar', { nullable: true })
+  expiredAt!: string | null;
+
   @Column('simple-json')
   reviews!: { at: string; byId: string; decision: 'keep' | 'change' | 'withdraw'; reason: string }[];
 }
