@@ -1,4 +1,5 @@
 import { newId } from '../common/ids.js';
+import { BuildCrewEntity } from '../features/builds/build-crew.entity.js';
 import { BuildEntity } from '../features/builds/build.entity.js';
 import type { ChapterEntity } from '../features/chapters/chapter.entity.js';
 import { HoleLineEntity } from '../features/kits/hole-line.entity.js';
@@ -134,5 +135,10 @@ export class CreateKit extends CreateAccount {
     });
     await this.insert(BuildEntity, build);
     return build;
+  }
+
+  /** Somebody helps on an aircraft. */
+  crew(build: { id: string }, user: { id: string }): Promise<void> {
+    return this.insert(BuildCrewEntity, { buildId: build.id, userId: user.id });
   }
 }

@@ -56,7 +56,7 @@ export function aHoleCardNearAnEdge(): HoleCard {
 
 export function aFix(facts: Partial<ProposeFix> = {}): ProposeFix {
   return {
-    kind: 'cleanUp',
+    kind: 'nextSize',
     summary: 'Ream both layers together, drive the next size',
     operations: [
       { no: 10, text: 'Cleco the row and ream to #21.', caution: 'Eyes and ears.' },
