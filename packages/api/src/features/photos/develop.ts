@@ -44,11 +44,13 @@ export async function develop(bytes: Buffer): Promise<Developed> {
 }
 
 async function readHead(bytes: Buffer): Promise<{ format?: string; width?: number; height?: number }> {
-  // SVG is text that draws, with reach beyond itself: it is not even looked at by a renderer.
-  const head = await sharp(bytes, { limitInputPixels: false })
-    .metadata()
-    .catch(() => null);
+  const head = await headOf(bytes).catch(() => null);
   if (!head?.format || !TAKEN.has(head.format))
     throw new WrongType('Photos are JPEG, PNG, WebP, or HEIC where it can be read here.');
   return head;
+}
+
+/** SVG is text that draws, with reach beyond itself: only its head is looked at, no renderer. Empty bytes throw at once. */
+async function headOf(bytes: Buffer) {
+  return sharp(bytes, { limitInputPixels: false }).metadata();
 }
