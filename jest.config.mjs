@@ -22,7 +22,10 @@ const project = (name, { jsx = false, ...rest } = {}) => ({
   rootDir: `packages/${name}`,
   transform: { '^.+\\.(t|j|mj)sx?$': swc(jsx), '^.+\\.mjs$': swc(false) },
   transformIgnorePatterns: [],
-  moduleNameMapper: { '^(\\.{1,2}/.*)\\.js$': ['$1.ts', '$1.tsx', '$1.js'], '\\.css$': '<rootDir>/src/testing/style-stub.ts' },
+  moduleNameMapper: {
+    '^(\\.{1,2}/.*)\\.js$': ['$1.ts', '$1.tsx', '$1.js'],
+    '\\.css$': '<rootDir>/src/testing/style-stub.ts',
+  },
   testEnvironment: 'node',
   testEnvironmentOptions: { customExportConditions: ['source', 'node', 'node-addons'] },
   ...rest,
@@ -33,13 +36,18 @@ export default {
   projects: [
     project('shared', { testMatch: ['<rootDir>/src/**/*.test.ts'] }),
     project('api', {
-      testMatch: ['<rootDir>/src/**/*.spec.ts', '<rootDir>/src/**/*.e2e-spec.ts', '<rootDir>/test/**/*.e2e-spec.ts'],
+      testMatch: [
+        '<rootDir>/src/**/*.spec.ts',
+        '<rootDir>/src/**/*.e2e-spec.ts',
+        '<rootDir>/test/**/*.e2e-spec.ts',
+      ],
     }),
     project('web', {
       jsx: true,
       testMatch: ['<rootDir>/src/**/*.test.{ts,tsx}'],
-      testEnvironment: 'jsdom',
-      testEnvironmentOptions: { customExportConditions: ['source', 'browser'] },
+      testEnvironment: '<rootDir>/src/testing/environment.ts',
+      // Not 'browser': msw answers Node's fetch, and hides that from browsers.
+      testEnvironmentOptions: { customExportConditions: ['source'] },
       setupFiles: ['<rootDir>/src/testing/globals.ts'],
       setupFilesAfterEnv: ['<rootDir>/src/testing/setup.ts'],
     }),

@@ -1,0 +1,14 @@
+import { useSyncExternalStore } from 'react';
+
+function subscribe(listener: () => void): () => void {
+  window.addEventListener('online', listener);
+  window.addEventListener('offline', listener);
+  return () => {
+    window.removeEventListener('online', listener);
+    window.removeEventListener('offline', listener);
+  };
+}
+
+export function useOnline(): boolean {
+  return useSyncExternalStore(subscribe, () => navigator.onLine);
+}
