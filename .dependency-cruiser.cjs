@@ -120,7 +120,6 @@ module.exports = {
     enhancedResolveOptions: {
       conditionNames: ['source', 'import', 'require', 'node', 'default'],
       exportsFields: ['exports'],
-      extensionAlias: { '.js': ['.ts', '.tsx', '.js'] },
     },
   },
 };

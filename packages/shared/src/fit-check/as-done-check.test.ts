@@ -3,7 +3,7 @@ import { asDoneCheck } from './as-done-check.js';
 import type { HoleCard } from './card-fields.js';
 import { fitCheck } from './fit-check.js';
 import { asDoneCheckSchema } from './hole-card.schema.js';
-import type { AsDone } from '../questions/question.schema.js';
+import type { AsDone } from '../questions/completion.schema.js';
 
 const planned = fitCheck(doublerCard()).remedies.find(({ kind }) => kind === 'nextSize')!;
 const WELL_DONE: AsDone = {

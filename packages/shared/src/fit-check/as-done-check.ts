@@ -1,7 +1,7 @@
 import { readLength } from '../measures/read-length.js';
 import { LENGTH_BEYOND_GRIP_D } from '../trade/limits.js';
 import { RIVET_DASHES } from '../trade/rivets.js';
-import type { AsDone } from '../questions/question.schema.js';
+import type { AsDone } from '../questions/completion.schema.js';
 import { lacking, layBench, rivetName, type Bench, type Plan } from './bench.js';
 import type { HoleCard } from './card-fields.js';
 import { edgeChecks } from './checks/edge-checks.js';

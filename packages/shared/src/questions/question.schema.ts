@@ -1,14 +1,11 @@
 import { z } from 'zod';
 import { idSchema, pageQueryShape, personSchema } from '../common/wire.schema.js';
-import {
-  asDoneCheckSchema,
-  fitCheckSchema,
-  holeCardSchema,
-  verdictSchema,
-} from '../fit-check/hole-card.schema.js';
+import { fitCheckSchema, holeCardSchema, verdictSchema } from '../fit-check/hole-card.schema.js';
 import { fixSchema } from '../fixes/fix.schema.js';
 import { photoIdsSchema, photoSchema } from '../photos/photo.schema.js';
 import { disciplineSchema, mishapSchema, questionStateSchema } from '../words/words.js';
+import { completionSchema, referralSchema } from './completion.schema.js';
+import { sheetEventSchema } from './sheet-event.schema.js';
 
 export const QUESTION_TITLE_MAX = 160;
 export const QUESTION_BODY_MAX = 10_000;
@@ -65,60 +62,6 @@ export const writeMessageSchema = z
   })
   .meta({ id: 'WriteMessage' });
 export type WriteMessage = z.infer<typeof writeMessageSchema>;
-
-const inchesMeasured = z
-  .number('Give a number in inches.')
-  .positive('A measured length is more than nothing.')
-  .max(100);
-
-/** What was really done, measured again. Lengths in inches. */
-export const asDoneSchema = z.strictObject({
-  finalDrill: z.string().trim().min(1).max(20).optional(),
-  edgeDistances: z.array(inchesMeasured).max(5).optional(),
-  shopHead: z.strictObject({ width: inchesMeasured, height: inchesMeasured }).optional(),
-  rivetLengthDash: z.number().min(1).max(64).optional(),
-  readings: z
-    .array(
-      z.strictObject({
-        what: z.string().trim().min(1).max(120),
-        value: z.number(),
-        unit: z.string().trim().min(1).max(20),
-        u: z.number().min(0).optional(),
-      }),
-    )
-    .max(40)
-    .optional(),
-});
-export type AsDone = z.infer<typeof asDoneSchema>;
-
-export const completeSchema = z
-  .strictObject({
-    fixId: idSchema,
-    asDone: asDoneSchema,
-    minutes: z
-      .number('Give the minutes as a number.')
-      .int('Whole minutes.')
-      .min(0)
-      .max(24 * 60 * 14, 'More than two weeks: give the working time only.'),
-    conditionsMet: z.array(z.string().trim().min(1).max(300)).max(60).optional(),
-    helpers: z.array(z.string().trim().min(1).max(120)).max(20).optional(),
-    photoIds: photoIdsSchema.optional(),
-    note: z.string().trim().max(4_000).optional(),
-  })
-  .meta({ id: 'CarryOut' });
-export type Complete = z.infer<typeof completeSchema>;
-
-export const referSchema = z
-  .strictObject({ note: z.string().trim().max(4_000).optional() })
-  .meta({ id: 'Refer' });
-export type Refer = z.infer<typeof referSchema>;
-export const referralAnswerSchema = z
-  .strictObject({
-    answer: z.string().trim().min(3, 'Write what the kit maker answered.').max(10_000),
-    reference: z.string().trim().min(1, 'Give the reference on the answer.').max(300),
-  })
-  .meta({ id: 'ReferralAnswer' });
-export type ReferralAnswer = z.infer<typeof referralAnswerSchema>;
 
 /** What a question waits for, and since when. */
 export const WAITS = [
@@ -188,80 +131,8 @@ export const questionQuerySchema = z.strictObject({
 });
 export type QuestionQuery = z.infer<typeof questionQuerySchema>;
 
-/** Everything that can happen on a sheet. `seq` grows by one per question. */
-export const SHEET_EVENTS = [
-  'asked',
-  'message',
-  'fix',
-  'fixWithdrawn',
-  'endorsement',
-  'endorsementWithdrawn',
-  'endorsementHeld',
-  'endorsementReviewed',
-  'endorsementExpired',
-  'objection',
-  'objectionAnswered',
-  'completion',
-  'referral',
-  'referralAnswer',
-  'withdrawn',
-] as const;
-export type SheetEventType = (typeof SHEET_EVENTS)[number];
-
 /** What changes on the sheet beside the event itself. */
 export const sheetStandingSchema = z.strictObject({ state: questionStateSchema, waits: waitSchema });
-
-export const completionSchema = z
-  .strictObject({
-    id: z.string(),
-    fixId: z.string(),
-    asDone: asDoneSchema,
-    check: asDoneCheckSchema.nullable(),
-    minutes: z.number().int(),
-    conditionsMet: z.array(z.string()),
-    conditionsLeft: z.array(z.string()),
-    helpers: z.array(z.string()),
-    note: z.string().nullable(),
-    by: personSchema,
-    at: z.string(),
-    entryId: z.string().nullable(),
-    photos: z.array(photoSchema),
-  })
-  .meta({ id: 'Completion' });
-export type Completion = z.infer<typeof completionSchema>;
-
-export const referralSchema = z
-  .strictObject({
-    id: z.string(),
-    at: z.string(),
-    by: personSchema,
-    note: z.string().nullable(),
-    answered: z
-      .strictObject({ at: z.string(), by: personSchema, answer: z.string(), reference: z.string() })
-      .nullable(),
-  })
-  .meta({ id: 'Referral' });
-export type Referral = z.infer<typeof referralSchema>;
-
-/**
- * `data` by type: message {body, photos}; fix, fixWithdrawn {fix}; endorsement… {endorsement};
- * objection, objectionAnswered {objection}; completion {completion}; referral, referralAnswer {referral};
- * asked {}; withdrawn {reason}. All but message carry `standing` besides.
- */
-export const sheetEventSchema = z
-  .strictObject({
-    questionId: z.string(),
-    seq: z.number().int(),
-    type: z.enum(SHEET_EVENTS),
-    at: z.string(),
-    by: personSchema,
-    data: z.record(z.string(), z.unknown()),
-  })
-  .meta({ id: 'SheetEvent' });
-export type SheetEvent = z.infer<typeof sheetEventSchema>;
-
-export const EVENTS_ON_SHEET = 50;
-export const EVENTS_PER_PAGE = 200;
 
 /** The whole sheet. */
 export const questionSchema = z
@@ -303,23 +174,6 @@ export const questionSchema = z
   .meta({ id: 'Question' });
 export type Question = z.infer<typeof questionSchema>;
 
-export const eventsQuerySchema = z.strictObject({
-  after: z.coerce.number().int().min(0).default(0),
-  /** Go back from here instead: the events before this seq, oldest first. */
-  before: z.coerce.number().int().min(1).optional(),
-  limit: z.coerce.number().int().min(1).max(EVENTS_PER_PAGE).optional(),
-});
-export type EventsQuery = z.infer<typeof eventsQuerySchema>;
-export const eventsAnswerSchema = z
-  .strictObject({
-    items: z.array(sheetEventSchema),
-    lastSeq: z.number().int(),
-    nextCursor: z.string().nullable(),
-  })
-  .meta({ id: 'SheetEvents' });
-
-export type SheetEvents = z.infer<typeof eventsAnswerSchema>;
-
 export const seenSchema = z.strictObject({ seq: z.number().int().min(0) }).meta({ id: 'Seen' });
 export type Seen = z.infer<typeof seenSchema>;
 
@@ -332,34 +186,3 @@ export const deskSchema = z
   })
   .meta({ id: 'Desk' });
 export type Desk = z.infer<typeof deskSchema>;
-
-export const similarQuerySchema = z
-  .strictObject({
-    holeCard: holeCardSchema.nullish(),
-    sectionId: idSchema.nullish(),
-    partId: idSchema.nullish(),
-    text: z.string().trim().max(500).nullish(),
-  })
-  .meta({ id: 'SimilarQuery' });
-export type SimilarQuery = z.infer<typeof similarQuerySchema>;
-
-/** The same as an address: beside a question, or for a place and words. */
-export const similarAskedSchema = z.strictObject({
-  questionId: idSchema.optional(),
-  sectionId: idSchema.optional(),
-  partId: idSchema.optional(),
-  text: z.string().trim().max(500).optional(),
-});
-export type SimilarAsked = z.infer<typeof similarAskedSchema>;
-
-/** A question met before. Why it is shown is said in words; nothing is ranked by a number on screen. */
-export const similarQuestionSchema = z
-  .strictObject({
-    question: questionRowSchema,
-    alikeIn: z.array(z.string()),
-    differsIn: z.array(z.string()),
-    score: z.number(),
-    holeCard: holeCardSchema.nullable(),
-  })
-  .meta({ id: 'SimilarQuestion' });
-export type SimilarQuestion = z.infer<typeof similarQuestionSchema>;

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import type { SheetEvent } from '../questions/question.schema.js';
+import type { SheetEvent } from '../questions/sheet-event.schema.js';
 
 /** What a client may say over the socket; all of it is checked like a request. */
 export const joinSheetSchema = z.strictObject({ questionId: z.uuid(), afterSeq: z.number().int().min(0) });

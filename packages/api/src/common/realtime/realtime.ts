@@ -40,14 +40,10 @@ export class Realtime {
 
   /** Says to a sheet who has it open, in whichever process; somebody with several tabs is there once. */
   async tellPresence(questionId: string): Promise<void> {
-    const room = this.server?.in(sheetRoom(questionId));
-    const people = new Map<string, SheetPresence['people'][number]>();
-    for (const { data } of (await room?.fetchSockets()) ?? []) {
-      const { id, name } = data.actor;
-      const writes = (data.writing[questionId] ?? 0) > Date.now();
-      people.set(id, { userId: id, name, writing: writes || (people.get(id)?.writing ?? false) });
-    }
-    if (people.size > 0) room?.emit('sheet:presence', { questionId, people: [...people.values()] });
+    if (!this.server) return;
+    const room = this.server.in(sheetRoom(questionId));
+    const people = peopleAt(questionId, await room.fetchSockets());
+    if (people.length > 0) room.emit('sheet:presence', { questionId, people });
   }
 
   questionChanged(rooms: string[], change: QuestionChanged): void {
@@ -76,6 +72,18 @@ export class Realtime {
       socket.conn.close();
     }
   }
+}
+
+/** Somebody with several tabs is there once, and writes if they do in any of them. */
+function peopleAt(questionId: string, sockets: readonly { data: LiveData }[]): SheetPresence['people'] {
+  const people = new Map<string, SheetPresence['people'][number]>();
+  const now = Date.now();
+  for (const { data } of sockets) {
+    const { id: userId, name } = data.actor;
+    const writing = (data.writing[questionId] ?? 0) > now || people.get(userId)?.writing === true;
+    people.set(userId, { userId, name, writing });
+  }
+  return [...people.values()];
 }
 
 function rightsOf({ siteRole, memberships }: Actor): string {

@@ -7,19 +7,17 @@ import { Settings } from '../../common/config/settings.js';
 import { PreparedReader } from '../../common/database/prepared-reader.js';
 import { UnitOfWork } from '../../common/database/unit-of-work.js';
 import { Clock } from '../../common/time/clock.js';
-import { QuestionDoorService } from '../questions/question-door.service.js';
+import { FixesService } from '../fixes/fixes.service.js';
 import { QuestionLogService } from '../questions/question-log.service.js';
-import { QuestionSheetService } from '../questions/question-sheet.service.js';
 import { EndorsementEntity } from './endorsement.entity.js';
 import { StampFollowUp } from './stamp-follow-up.js';
 
-const RAN_OUT = `SELECT e."id", e."fixId", e."questionId", e."byId", u."name" AS "byName" FROM "endorsements" e JOIN "users" u ON u."id" = e."byId"
+const RAN_OUT = `SELECT e."id", e."fixId", e."byId", u."name" AS "byName" FROM "endorsements" e JOIN "users" u ON u."id" = e."byId"
   WHERE e."goodUntil" < ? AND e."expiredAt" IS NULL AND e."withdrawnAt" IS NULL ORDER BY e."goodUntil" LIMIT 200`;
 
 interface RanOut {
   id: string;
   fixId: string;
-  questionId: string;
   byId: string;
   byName: string;
 }
@@ -32,8 +30,7 @@ export class StampExpiryJob implements OnApplicationBootstrap {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly reader: PreparedReader,
-    private readonly door: QuestionDoorService,
-    private readonly sheets: QuestionSheetService,
+    private readonly fixes: FixesService,
     private readonly log: QuestionLogService,
     private readonly followUp: StampFollowUp,
     private readonly settings: Settings,
@@ -56,9 +53,8 @@ export class StampExpiryJob implements OnApplicationBootstrap {
     }
   }
 
-  private async tell({ id, fixId, questionId, byId, byName }: RanOut): Promise<void> {
-    const question = this.door.find(questionId)!;
-    const fix = this.sheets.fixes(questionId).find((one) => one.id === fixId)!;
+  private async tell({ id, fixId, byId, byName }: RanOut): Promise<void> {
+    const { question, fix } = this.fixes.requireById(fixId);
     const endorsement = fix.endorsements.find((one) => one.id === id)!;
     const by: Person = { id: byId, name: byName };
     await this.unitOfWork.run(async (tx) => {

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import {
   type Actor,
   canProposeFix,
+  canSeeQuestion,
   canWithdrawFix,
   ENGINE_VERSION,
   type Fix,
@@ -19,7 +20,7 @@ import { type Tx, UnitOfWork } from '../../common/database/unit-of-work.js';
 import { authorize, Conflict, NotFound } from '../../common/errors/app-error.js';
 import { newId } from '../../common/ids.js';
 import { Clock } from '../../common/time/clock.js';
-import { type KnownQuestion, QuestionDoorService } from '../questions/question-door.service.js';
+import { type KnownQuestion, QuestionDoorService, wall } from '../questions/question-door.service.js';
 import { QuestionLogService } from '../questions/question-log.service.js';
 import { QuestionSheetService } from '../questions/question-sheet.service.js';
 import { SearchIndexService } from '../search/search-index.service.js';
@@ -27,6 +28,11 @@ import { FixEntity } from './fix.entity.js';
 
 const QUESTION_OF_FIX = 'SELECT "questionId" FROM "fixes" WHERE "id" = ?';
 const NEXT_NUMBER = 'SELECT coalesce(max("number"), 0) + 1 AS "number" FROM "fixes" WHERE "questionId" = ?';
+
+export interface FixOnSheet {
+  readonly question: KnownQuestion;
+  readonly fix: Fix;
+}
 
 @Injectable()
 export class FixesService {
@@ -110,12 +116,24 @@ export class FixesService {
   }
 
   /** A fix with its question; hidden with the question from whoever may not see that. */
-  requireVisible(actor: Actor, fixId: string): { question: KnownQuestion; fix: Fix } {
+  requireVisible(actor: Actor, fixId: string): FixOnSheet {
+    const found = this.find(fixId);
+    if (!found || !canSeeQuestion(actor, found.question)) throw new NotFound('fix');
+    return found;
+  }
+
+  /** For the app itself: whoever asks for somebody asks `requireVisible`. */
+  requireById(fixId: string): FixOnSheet {
+    const found = this.find(fixId);
+    if (!found) throw new NotFound('fix');
+    return found;
+  }
+
+  private find(fixId: string): FixOnSheet | null {
     const row = this.reader.get<{ questionId: string }>(QUESTION_OF_FIX, [fixId]);
-    if (!row) throw new NotFound('fix');
-    const question = this.door.requireVisible(actor, row.questionId);
+    if (!row) return null;
     const fix = this.sheets.fixes(row.questionId).find(({ id }) => id === fixId)!;
-    return { question, fix };
+    return { question: this.door.find(row.questionId)!, fix };
   }
 
   private async nextNumber(tx: Tx, questionId: string): Promise<number> {
@@ -125,14 +143,13 @@ export class FixesService {
 
   private async remember(tx: Tx, question: KnownQuestion, fix: FixEntity): Promise<void> {
     const words = [...fix.operations.map(({ text }) => text), ...fix.conditions].join(' ');
-    const { kitId, audience, chapterId, id: questionId } = question;
-    const wall = audience === 'kit' ? null : chapterId;
+    const { kitId, id: questionId } = question;
     await this.index.addIn(tx, {
       kind: 'fix',
       refId: fix.id,
       questionId,
       kitId,
-      chapterId: wall,
+      chapterId: wall(question),
       title: fix.summary,
       words,
     });

@@ -83,3 +83,8 @@ export class QuestionDoorService {
     return ids.includes(askedById) ? ids : [...ids, askedById];
   }
 }
+
+/** The chapter within which it is found; null where every chapter of the kit may. */
+export function wall(question: Pick<KnownQuestion, 'audience' | 'chapterId'>): string | null {
+  return question.audience === 'kit' ? null : question.chapterId;
+}

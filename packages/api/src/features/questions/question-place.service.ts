@@ -4,7 +4,7 @@ import { PreparedReader } from '../../common/database/prepared-reader.js';
 import { BadInput, type FieldFault } from '../../common/errors/app-error.js';
 import { BuildsService } from '../builds/builds.service.js';
 
-interface Place {
+export interface Place {
   readonly kitName: string;
   readonly sectionCode: string | null;
   /** Where it is, in words, for the search. */
@@ -37,10 +37,7 @@ export class QuestionPlaceService {
 
   find(actor: Actor, input: AskQuestion): Place {
     const faults: FieldFault[] = [];
-    const kit = this.reader.get<{ name: string }>(KIT, [input.kitId]);
-    if (!kit) faults.push({ path: 'kitId', message: 'There is no such kit.' });
-    else if (!this.reader.get(BUILDS_KIT, [input.kitId, input.chapterId]))
-      faults.push({ path: 'chapterId', message: 'This chapter does not build that kit.' });
+    const kitName = this.kitName(input, faults);
     const section = input.sectionId
       ? this.reader.get<{ kitId: string; code: string; name: string }>(SECTION, [input.sectionId])
       : null;
@@ -50,7 +47,15 @@ export class QuestionPlaceService {
     const buildId = this.buildOf(actor, input, faults);
     if (faults.length > 0) throw new BadInput(faults);
     const words = [section?.name, ...within.names].filter(Boolean).join(' · ');
-    return { kitName: kit!.name, sectionCode: section?.code ?? null, words, buildId, limits: within.limits };
+    return { kitName, sectionCode: section?.code ?? null, words, buildId, limits: within.limits };
+  }
+
+  private kitName({ kitId, chapterId }: AskQuestion, faults: FieldFault[]): string {
+    const kit = this.reader.get<{ name: string }>(KIT, [kitId]);
+    if (!kit) faults.push({ path: 'kitId', message: 'There is no such kit.' });
+    else if (!this.reader.get(BUILDS_KIT, [kitId, chapterId]))
+      faults.push({ path: 'chapterId', message: 'This chapter does not build that kit.' });
+    return kit?.name ?? '';
   }
 
   private within(input: AskQuestion, faults: FieldFault[]): { names: string[]; limits: KitLimits | null } {

@@ -27,6 +27,7 @@ import {
 } from '@rivetside/shared';
 import { Access, Actor } from '../../common/access/access.decorator.js';
 import { UuidPipe } from '../../common/http/uuid.pipe.js';
+import { AskService } from './ask.service.js';
 import { QuestionListService } from './question-list.service.js';
 import { QuestionSheetService } from './question-sheet.service.js';
 import { QuestionsService } from './questions.service.js';
@@ -35,6 +36,7 @@ import { QuestionsService } from './questions.service.js';
 @Controller('questions')
 export class QuestionsController {
   constructor(
+    private readonly asking: AskService,
     private readonly questions: QuestionsService,
     private readonly lists: QuestionListService,
     private readonly sheets: QuestionSheetService,
@@ -54,7 +56,7 @@ export class QuestionsController {
   @Access('builder')
   @ApiCreatedResponse({ standardSchema: questionSchema })
   ask(@Actor() actor: ActorType, @Body({ schema: askQuestionSchema }) input: AskQuestion): Promise<Question> {
-    return this.questions.ask(actor, input);
+    return this.asking.ask(actor, input);
   }
 
   @Get(':id')

@@ -2,6 +2,7 @@ import { Module } from '@nestjs/common';
 import { BuildsModule } from '../builds/builds.module.js';
 import { PhotosModule } from '../photos/photos.module.js';
 import { SearchModule } from '../search/search.module.js';
+import { AskService } from './ask.service.js';
 import { CompletionService } from './completion.service.js';
 import { DeskController } from './desk.controller.js';
 import { DeskService } from './desk.service.js';
@@ -24,6 +25,7 @@ import { SimilarService } from './similar.service.js';
   imports: [BuildsModule, PhotosModule, SearchModule],
   controllers: [SimilarController, QuestionsController, QuestionOutcomeController, DeskController],
   providers: [
+    AskService,
     CompletionService,
     DeskService,
     QuestionDoorService,

@@ -1,33 +1,25 @@
 import { Injectable } from '@nestjs/common';
 import {
   type Actor,
-  type AskQuestion,
-  canAskIn,
   canTalk,
   canWithdrawQuestion,
-  fitCheck,
-  headlineTrouble,
   type Question,
   type ReasonBody,
   type SheetEvent,
   type WriteMessage,
 } from '@rivetside/shared';
 import type { PreparedDb } from '../../common/database/prepared.js';
-import { type Tx, UnitOfWork } from '../../common/database/unit-of-work.js';
+import { UnitOfWork } from '../../common/database/unit-of-work.js';
 import { authorize, BadInput, Conflict } from '../../common/errors/app-error.js';
 import { newId } from '../../common/ids.js';
 import { Clock } from '../../common/time/clock.js';
-import { PhotosService } from '../photos/photos.service.js';
 import { SearchIndexService } from '../search/search-index.service.js';
-import { type KnownQuestion, QuestionDoorService } from './question-door.service.js';
+import { QuestionDoorService, wall } from './question-door.service.js';
 import { QuestionLogService } from './question-log.service.js';
-import { QuestionNumberEntity } from './question-number.entity.js';
-import { cardWithLimits, QuestionPlaceService } from './question-place.service.js';
 import { QuestionSheetService } from './question-sheet.service.js';
 import { QuestionEntity } from './question.entity.js';
 import { SEEN } from './questions.sql.js';
 
-const WHOLE_BUILD = 'KIT';
 const ATTACH = 'INSERT INTO "photo_uses" ("photoId", "questionId", "usedIn", "position") VALUES (?, ?, ?, ?)';
 const OWN_UNUSED = `SELECT count(*) AS "n" FROM "photos" p WHERE p."id" IN (SELECT value FROM json_each(?)) AND p."ownerId" = ?
   AND NOT EXISTS (SELECT 1 FROM "photo_uses" u WHERE u."photoId" = p."id")`;
@@ -37,66 +29,11 @@ export class QuestionsService {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly door: QuestionDoorService,
-    private readonly places: QuestionPlaceService,
     private readonly log: QuestionLogService,
     private readonly sheets: QuestionSheetService,
     private readonly index: SearchIndexService,
-    private readonly photos: PhotosService,
     private readonly clock: Clock,
   ) {}
-
-  async ask(actor: Actor, input: AskQuestion): Promise<Question> {
-    authorize(canAskIn(actor, input.chapterId), 'You ask in a chapter where you are a builder.');
-    const place = this.places.find(actor, input);
-    const holeCard = cardWithLimits(input.holeCard, place.limits);
-    const check = holeCard ? fitCheck(holeCard) : null;
-    const id = newId();
-    await this.unitOfWork.run(async (tx) => {
-      const at = this.clock.instant();
-      const { photoIds, ...asked } = input;
-      const question: QuestionEntity = Object.assign(new QuestionEntity(), nothingNamed, asked, {
-        id,
-        number: await this.nextNumber(tx, input.kitId, place.sectionCode ?? WHOLE_BUILD),
-        holes: input.holes ?? [],
-        buildId: place.buildId,
-        holeCard,
-        fitCheck: check,
-        headline: check ? headlineTrouble(input.mishap, check) : null,
-        askedById: actor.id,
-        askedAt: at,
-        state: 'open' as const,
-        waitsFor: 'firstFix' as const,
-        waitsSince: at,
-        lastSeq: 0,
-        lastActivityAt: at,
-      });
-      await tx.manager.insert(QuestionEntity, question);
-      await this.photos.attach(tx, {
-        photoIds: photoIds ?? [],
-        ownerId: actor.id,
-        questionId: id,
-        usedIn: 'question',
-      });
-      await this.log.append(tx, question, {
-        type: 'asked',
-        by: { id: actor.id, name: actor.name },
-        data: {},
-      });
-      await tx.manager.query(SEEN, [actor.id, id, 1]);
-      const { title, body, kitId } = input;
-      await this.index.addIn(tx, {
-        kind: 'question',
-        refId: id,
-        questionId: id,
-        kitId,
-        chapterId: wall(question),
-        title,
-        place: `${question.number} ${place.words}`,
-        words: body,
-      });
-    });
-    return this.sheets.read(actor, id);
-  }
 
   async write(actor: Actor, id: string, { body, photoIds }: WriteMessage): Promise<SheetEvent> {
     const question = this.door.requireVisible(actor, id);
@@ -161,14 +98,6 @@ export class QuestionsService {
     return this.sheets.read(actor, id);
   }
 
-  /** Punched in order, per kit and section. */
-  private async nextNumber(tx: Tx, kitId: string, code: string): Promise<string> {
-    const known = await tx.manager.findOneBy(QuestionNumberEntity, { kitId, code });
-    const last = (known?.last ?? 0) + 1;
-    await tx.manager.save(QuestionNumberEntity, { kitId, code, last });
-    return `${code}-Q-${String(last).padStart(3, '0')}`;
-  }
-
   private hang(
     db: PreparedDb,
     use: { photoIds: readonly string[]; ownerId: string; questionId: string; usedIn: string },
@@ -180,18 +109,4 @@ export class QuestionsService {
     for (const [position, photoId] of use.photoIds.entries())
       db.run(ATTACH, [photoId, use.questionId, use.usedIn, position]);
   }
-}
-
-const nothingNamed = {
-  sectionId: null,
-  stepId: null,
-  partId: null,
-  holeLineId: null,
-  withdrawnAt: null,
-  withdrawnReason: null,
-};
-
-/** The chapter within which it is found; null where every chapter of the kit may. */
-export function wall(question: Pick<KnownQuestion, 'audience' | 'chapterId'>): string | null {
-  return question.audience === 'kit' ? null : question.chapterId;
 }
