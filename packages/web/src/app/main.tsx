@@ -22,3 +22,7 @@ void session.start().catch(() => undefined);
 createRoot(document.getElementById('root')!).render(
   <App router={createBrowserRouter(createRoutes(queryClient))} queryClient={queryClient} />,
 );
+
+/** Wanted when there is no network, so it is fetched while there is one and nothing else is going on. */
+const readStopPage = () => void import('../routes/stop').catch(() => undefined);
+window.addEventListener('load', () => setTimeout(readStopPage, 2_000), { once: true });

@@ -89,7 +89,7 @@ async function askForNewToken(): Promise<SignedIn | null> {
   if (answer.status === 401) return null;
   const body: unknown = await answer.json().catch(() => null);
   if (!answer.ok) throw Problem.ofAnswer(answer.status, body);
-  const { signedInSchema } = await import('@rivetside/shared');
+  const { signedInSchema } = await import('./answers');
   const signedIn = signedInSchema.parse(body);
   access.take(signedIn);
   return signedIn;

@@ -37,7 +37,7 @@ export const session = {
   },
 
   async signIn(input: SignIn): Promise<Me> {
-    const { signedInSchema } = await import('@rivetside/shared');
+    const { signedInSchema } = await import('./answers');
     const signedIn = await api.post('/auth/sign-in', { body: input, answer: signedInSchema });
     starting = Promise.resolve(signedIn.user);
     return enter(signedIn);
@@ -84,7 +84,7 @@ export function useActor(): Me {
 export const meQuery = queryOptions({
   queryKey: ['me'] as const,
   queryFn: async ({ signal }) => {
-    const { meSchema } = await import('@rivetside/shared');
+    const { meSchema } = await import('./answers');
     return session.changed(await api.get('/me', { answer: meSchema, signal }));
   },
 });

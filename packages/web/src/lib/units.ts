@@ -53,7 +53,7 @@ export function useSetUnits(): (next: Units) => void {
 
 /** A network that is away must not turn the switch back under the reader's hand. */
 async function keepInAccount(next: Units): Promise<void> {
-  const { meSchema } = await import('@rivetside/shared');
+  const { meSchema } = await import('./answers');
   await api
     .patch('/me', { body: { units: next }, answer: meSchema })
     .then(session.changed)

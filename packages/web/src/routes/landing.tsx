@@ -1,3 +1,7 @@
+import { Welcome } from '../features/welcome/welcome';
+import { usePageTitle } from '../lib/page-title';
+
 export function Component() {
-  return null;
+  usePageTitle('');
+  return <Welcome />;
 }

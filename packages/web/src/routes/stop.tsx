@@ -1,3 +1,10 @@
+import { useLocation } from 'react-router-dom';
+import { StopPage } from '../features/stop/stop-page';
+import { usePageTitle } from '../lib/page-title';
+
+export const handle = { crumbs: () => [{ label: 'Bench', to: '/bench' }, { label: 'Something is wrong' }] };
+
 export function Component() {
-  return null;
+  usePageTitle('Something is wrong');
+  return <StopPage search={useLocation().search} />;
 }

@@ -1,5 +1,4 @@
 import type { Me } from '@rivetside/shared';
-import { buildSchema, pageOf } from '@rivetside/shared';
 import { queryOptions, useQuery } from '@tanstack/react-query';
 import { api } from '../../lib/api';
 import { useMe } from '../../lib/session';
@@ -26,7 +25,10 @@ const RECORD: Place = { label: 'Record', to: '/record', icon: 'record', below: [
 export const ownBuilds = (me: Me | null) =>
   queryOptions({
     queryKey: ['builds', 'own'] as const,
-    queryFn: ({ signal }) => api.get('/builds', { answer: pageOf(buildSchema), signal }),
+    queryFn: async ({ signal }) => {
+      const { buildSchema, pageOf } = await import('../../lib/answers');
+      return api.get('/builds', { answer: pageOf(buildSchema), signal });
+    },
     enabled: me !== null,
     staleTime: 5 * 60_000,
   });

@@ -33,7 +33,8 @@ const NEWER: Trouble = {
 
 export function troubleOf(error: unknown): Trouble {
   const isKnown = error instanceof Problem || isRouteErrorResponse(error);
-  if (!isKnown) return NEWER;
+  // A page whose script was never fetched fails like this too.
+  if (!isKnown) return navigator.onLine ? NEWER : NO_NETWORK;
   if (error.status === 0) return NO_NETWORK;
   if (error.status === 404) return GONE;
   if (error.status === 403) return NOT_YOURS;

@@ -36,3 +36,25 @@ export function Door({ title, children }: DoorProps): ReactNode {
     </section>
   );
 }
+
+export function OtherDoors({ children }: { readonly children: ReactNode }): ReactNode {
+  return <nav className={classes['others']}>{children}</nav>;
+}
+
+export function AccountCards({ children }: { readonly children: ReactNode }): ReactNode {
+  return (
+    <>
+      <h1 className="unseen">Your account</h1>
+      <div className={classes['sheets']}>{children}</div>
+    </>
+  );
+}
+
+export function AccountCard({ title, children }: DoorProps): ReactNode {
+  return (
+    <section className={classes['card']} aria-label={title}>
+      <h2>{title}</h2>
+      {children}
+    </section>
+  );
+}
