@@ -4,7 +4,7 @@ import { redirect, type LoaderFunction, type LoaderFunctionArgs, type RouteObjec
 import { pageWanted } from '../lib/page-wanted';
 import { session } from '../lib/session';
 import { PageLoading } from './shell/page-loading';
-import { RouteError } from './shell/route-error';
+import { NowherePage, RouteError } from './shell/route-error';
 import { Shell } from './shell/shell';
 
 /** What a file of routes/ exports. */
@@ -87,14 +87,7 @@ export function createRoutes(queryClient: QueryClient): RouteObject[] {
       Component: Shell,
       HydrateFallback: PageLoading,
       ErrorBoundary: RouteError,
-      children: [
-        ...PAGES.map((page) => routeOf(page, queryClient)),
-        { path: '*', Component: NowhereToGo, ErrorBoundary: RouteError },
-      ],
+      children: [...PAGES.map((page) => routeOf(page, queryClient)), { path: '*', Component: NowherePage }],
     },
   ];
-}
-
-function NowhereToGo(): never {
-  throw new Response(null, { status: 404 });
 }

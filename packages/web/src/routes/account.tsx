@@ -5,7 +5,7 @@ import { SessionList } from '../features/accounts/session-list';
 import { usePageTitle } from '../lib/page-title';
 import { useMe } from '../lib/session';
 
-export const handle = { crumbs: () => [{ label: 'Your account' }] };
+export const handle = { crumbs: () => [{ label: 'Bench', to: '/bench' }, { label: 'Your account' }] };
 
 export function Component() {
   usePageTitle('Your account');

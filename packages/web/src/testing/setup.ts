@@ -1,4 +1,5 @@
 import '@testing-library/jest-dom';
+import { cleanup } from '@testing-library/react';
 import { session } from '../lib/session';
 import { keptOnDevice } from './kept-on-device';
 import { server } from './server';
@@ -7,6 +8,8 @@ jest.mock('idb-keyval', () => jest.requireActual('./kept-on-device'));
 
 beforeAll(() => server.listen({ onUnhandledRequest: 'error' }));
 afterEach(() => {
+  // Taken down first: what ends after it has no page to tell.
+  cleanup();
   server.resetHandlers();
   session.end();
   keptOnDevice.clear();

@@ -6,7 +6,7 @@ import classes from './shell.module.css';
 export function OfflineBanner(): ReactNode {
   const isOnline = useOnline();
   return (
-    <div role="status">
+    <div aria-live="polite">
       {!isOnline && (
         <div className={classes['banner']}>
           <span>

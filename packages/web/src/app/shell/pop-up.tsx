@@ -57,7 +57,7 @@ export function PopUp({ shownAs, label, initials, children }: PopUpProps): React
         onClick={() => setOpen(!isOpen)}
       >
         {shownAs === 'initials' ? (
-          initials
+          <span>{initials}</span>
         ) : (
           <>
             <Icon name="more" />

@@ -11,7 +11,7 @@ export function Rail({ more }: { readonly more: ReactNode }): ReactNode {
   return (
     <nav className={classes['rail']} aria-label="Places">
       <Link to="/bench" className={classes['mark']} aria-label="Rivetside, to your bench">
-        <Mark />
+        <Mark size={26} />
       </Link>
       {places.map((place) => (
         <Link

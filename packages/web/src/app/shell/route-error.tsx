@@ -43,7 +43,14 @@ export function troubleOf(error: unknown): Trouble {
 
 /** What happened, what was kept, and what to do, in place of a page. */
 export function RouteError(): ReactNode {
-  const { title, detail, mayTryAgain } = troubleOf(useRouteError());
+  return <TroubleCard {...troubleOf(useRouteError())} />;
+}
+
+export function NowherePage(): ReactNode {
+  return <TroubleCard {...GONE} />;
+}
+
+function TroubleCard({ title, detail, mayTryAgain }: Trouble): ReactNode {
   const { revalidate, state } = useRevalidator();
   usePageTitle(title);
   return (

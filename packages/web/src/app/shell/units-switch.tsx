@@ -6,7 +6,7 @@ export function UnitsSwitch(): ReactNode {
   const units = useUnits();
   const setUnits = useSetUnits();
   return (
-    <div role="group" aria-label="Units" className={classes['units']}>
+    <div role="group" aria-label="Lengths in" className={classes['units']}>
       {(['inch', 'mm'] as const).map((one) => (
         <button key={one} type="button" aria-pressed={units === one} onClick={() => setUnits(one)}>
           {one}

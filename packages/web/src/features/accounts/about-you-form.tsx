@@ -56,5 +56,5 @@ export function Kept({
   readonly isKept: boolean;
   readonly children: ReactNode;
 }): ReactNode {
-  return <div role="status">{isKept && <p className={classes['done']}>{children}</p>}</div>;
+  return <div aria-live="polite">{isKept && <p className={classes['done']}>{children}</p>}</div>;
 }

@@ -1,4 +1,4 @@
-import { formatLength, MEASURING_TOOLS, type MeasuringTool } from '@rivetside/shared';
+import { formatLengthUnit, MEASURING_TOOLS, type MeasuringTool } from '@rivetside/shared';
 import type { ReactNode } from 'react';
 import { useUnits } from '../../lib/units';
 import { Across, Apart, Edge, Pitch, Stack } from './drawings';
@@ -49,7 +49,7 @@ export function Measures(): ReactNode {
   const units = useUnits();
   const nameOf = (tool: MeasuringTool): string => {
     const found = MEASURING_TOOLS.find((one) => one.tool === tool)!;
-    return `${found.name}, ± ${formatLength(found.error, units)}`;
+    return `${found.name}, ± ${formatLengthUnit(found.error, units)}`;
   };
   return (
     <ol className={classes['measures']}>
@@ -59,9 +59,11 @@ export function Measures(): ReactNode {
           <div>
             <h3>{what}</h3>
             <p>{how}</p>
-            <p className={classes['tools']}>
-              with <span>{tools.map(nameOf).join(' · ')}</span> {units === 'mm' ? 'mm' : 'in'}
-            </p>
+            <ul className={classes['tools']}>
+              {tools.map((tool) => (
+                <li key={tool}>{nameOf(tool)}</li>
+              ))}
+            </ul>
           </div>
         </li>
       ))}
