@@ -59,6 +59,7 @@ export default defineConfig({
   build: {
     target: 'es2022',
     sourcemap: false,
+    manifest: true,
     // Fonts and drawings keep files of their own: inlined they would be fetched by everybody, and the policy forbids data: fonts.
     assetsInlineLimit: 0,
     modulePreload: { polyfill: false },
