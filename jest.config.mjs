@@ -33,6 +33,8 @@ const project = (name, { jsx = false, ...rest } = {}) => ({
 
 export default {
   cacheDirectory: '.cache/jest',
+  // A slow machine is no failure: only what never ends is.
+  testTimeout: 60_000,
   projects: [
     project('shared', { testMatch: ['<rootDir>/src/**/*.test.ts'] }),
     project('api', {

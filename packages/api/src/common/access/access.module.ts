@@ -14,6 +14,7 @@ import {
 } from './access-tokens.js';
 import { ActorReader } from './actor-reader.js';
 import { JwtStrategy } from './jwt.strategy.js';
+import { KnownTokens } from './known-tokens.js';
 
 @Global()
 @Module({
@@ -33,7 +34,13 @@ import { JwtStrategy } from './jwt.strategy.js';
       }),
     }),
   ],
-  providers: [ActorReader, AccessTokens, JwtStrategy, { provide: APP_GUARD, useClass: AccessGuard }],
+  providers: [
+    ActorReader,
+    AccessTokens,
+    KnownTokens,
+    JwtStrategy,
+    { provide: APP_GUARD, useClass: AccessGuard },
+  ],
   exports: [ActorReader, AccessTokens],
 })
 export class AccessModule {}

@@ -16,9 +16,18 @@ interface MembershipRow {
   status: Membership['status'];
 }
 
-/** Reads who somebody is at every request: an ended session or a lost role counts at once, not at expiry. */
+const NEWEST_CHANGE = 'SELECT coalesce(max("seq"), 0) AS "seq" FROM "standing_changes"';
+const KNOWN_MAX = 20_000;
+
+/**
+ * Says who somebody is, asked at every request: an ended session or a lost role counts at once, not at expiry. The
+ * database numbers every change of standing, so what was read stays good for as long as that number does.
+ */
 @Injectable()
 export class ActorReader {
+  private readonly known = new Map<string, Actor>();
+  private asOf = -1;
+
   constructor(private readonly reader: PreparedReader) {}
 
   /** Null when the session has ended or is another's. */
@@ -29,8 +38,22 @@ export class ActorReader {
 
   /** Null when the session has ended or the account is disabled. */
   ofSession(sessionId: string): Actor | null {
+    this.forgetWhatChanged();
+    const known = this.known.get(sessionId);
+    if (known) return known;
     const user = this.reader.get<{ id: string; name: string; siteRole: SiteRole }>(LIVE_SESSION, [sessionId]);
-    return user ? { ...user, sessionId, memberships: this.membershipsOf(user.id) } : null;
+    if (!user) return null;
+    const actor = { ...user, sessionId, memberships: this.membershipsOf(user.id) };
+    if (this.known.size >= KNOWN_MAX) this.known.clear();
+    this.known.set(sessionId, actor);
+    return actor;
+  }
+
+  private forgetWhatChanged(): void {
+    const { seq } = this.reader.get<{ seq: number }>(NEWEST_CHANGE)!;
+    if (seq === this.asOf) return;
+    this.known.clear();
+    this.asOf = seq;
   }
 
   membershipsOf(userId: string): Membership[] {

@@ -21,8 +21,10 @@ const TRIGGERS = [
     WHEN NEW."endedAt" IS NOT OLD."endedAt" ${note('NEW."userId"')}`,
   `CREATE TRIGGER "standing_by_session_gone" AFTER DELETE ON "sessions"
     WHEN OLD."endedAt" IS NULL ${note('OLD."userId"')}`,
-  `CREATE TRIGGER "standing_by_account" AFTER UPDATE OF "siteRole", "disabledAt" ON "users"
-    WHEN NEW."siteRole" IS NOT OLD."siteRole" OR NEW."disabledAt" IS NOT OLD."disabledAt" ${note('NEW."id"')}`,
+  `CREATE TRIGGER "standing_by_account" AFTER UPDATE OF "siteRole", "disabledAt", "name" ON "users"
+    WHEN NEW."siteRole" IS NOT OLD."siteRole" OR NEW."disabledAt" IS NOT OLD."disabledAt" OR NEW."name" <> OLD."name" ${note('NEW."id"')}`,
+  `CREATE TRIGGER "standing_by_chapter_name" AFTER UPDATE OF "name" ON "chapters" WHEN NEW."name" <> OLD."name"
+    BEGIN INSERT INTO "standing_changes" ("userId") SELECT "userId" FROM "memberships" WHERE "chapterId" = NEW."id"; END`,
   `CREATE TRIGGER "standing_by_joining" AFTER INSERT ON "memberships" ${note('NEW."userId"')}`,
   `CREATE TRIGGER "standing_by_role" AFTER UPDATE OF "chapterId", "roles", "disciplines", "status" ON "memberships"
     WHEN NEW."chapterId" <> OLD."chapterId" OR NEW."roles" <> OLD."roles"
