@@ -6,10 +6,13 @@ import { api } from './api';
 import { createStore } from './store';
 
 const me = createStore<Me | null>(null);
+/** Somebody was signed in on this device and the server has not said yet whether they still are. */
+const resuming = createStore(access.wasSignedIn());
 let starting: Promise<Me | null> | null = null;
 
 function enter(signedIn: SignedIn): Me {
   access.take(signedIn);
+  resuming.set(false);
   me.set(signedIn.user);
   return signedIn.user;
 }
@@ -29,10 +32,12 @@ export const session = {
 
   /** Takes up an earlier session, once; a failed try, as without a network, may be made again. */
   start(): Promise<Me | null> {
-    starting ??= resume().catch((error: unknown) => {
-      starting = null;
-      throw error;
-    });
+    starting ??= resume()
+      .catch((error: unknown) => {
+        starting = null;
+        throw error;
+      })
+      .finally(() => resuming.set(false));
     return starting;
   },
 
@@ -68,6 +73,11 @@ export const session = {
 
 export function useMe(): Me | null {
   return useSyncExternalStore(me.subscribe, me.get);
+}
+
+/** The shell of whoever was signed in stands before the answer has come: else it would be built twice. */
+export function useIsResuming(): boolean {
+  return useSyncExternalStore(resuming.subscribe, resuming.get);
 }
 
 export function useIsLost(): boolean {

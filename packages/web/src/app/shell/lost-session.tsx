@@ -10,7 +10,7 @@ import type { ReactNode } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { SignInForm } from '../../features/accounts/sign-in-form';
 import { session } from '../../lib/session';
-import classes from './shell.module.css';
+import classes from './lost-session.module.css';
 
 /** Over the page and not in its place: what was typed below stays, and what was being sent goes on. */
 export function LostSession({ me }: { readonly me: Me }): ReactNode {
@@ -28,11 +28,11 @@ export function LostSession({ me }: { readonly me: Me }): ReactNode {
       closeOnClickOutside={false}
       centered
       title="Your session has ended"
-      classNames={{ title: classes['dialogTitle'] ?? '' }}
+      className={classes['dialog'] ?? ''}
     >
-      <p className={classes['dialogWords']}>Sign in again and go on: nothing on this page is lost.</p>
+      <p>Sign in again and go on: nothing on this page is lost.</p>
       <SignInForm email={me.email} onSignedIn={() => undefined} />
-      <p className={classes['dialogWords']}>
+      <p>
         <button type="button" className="btn plain" onClick={() => void leave()}>
           Leave this page and sign in as somebody else
         </button>

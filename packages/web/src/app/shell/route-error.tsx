@@ -43,15 +43,20 @@ export function troubleOf(error: unknown): Trouble {
 
 /** What happened, what was kept, and what to do, in place of a page. */
 export function RouteError(): ReactNode {
-  return <TroubleCard {...troubleOf(useRouteError())} />;
+  const error = useRouteError();
+  const { revalidate } = useRevalidator();
+  // A script that did not come is not asked for twice by every browser; the page as a whole is.
+  const isOfPage = !(error instanceof Problem) && !isRouteErrorResponse(error);
+  const tryAgain = () => (isOfPage && navigator.onLine ? window.location.reload() : void revalidate());
+  return <TroubleCard {...troubleOf(error)} onTryAgain={tryAgain} />;
 }
 
 export function NowherePage(): ReactNode {
   return <TroubleCard {...GONE} />;
 }
 
-function TroubleCard({ title, detail, mayTryAgain }: Trouble): ReactNode {
-  const { revalidate, state } = useRevalidator();
+function TroubleCard(props: Trouble & { readonly onTryAgain?: () => void }): ReactNode {
+  const { title, detail, mayTryAgain, onTryAgain } = props;
   usePageTitle(title);
   return (
     <section className={classes['error']} role="alert">
@@ -59,12 +64,7 @@ function TroubleCard({ title, detail, mayTryAgain }: Trouble): ReactNode {
       <p>{detail}</p>
       <div>
         {mayTryAgain && (
-          <button
-            type="button"
-            className="btn"
-            disabled={state === 'loading'}
-            onClick={() => void revalidate()}
-          >
+          <button type="button" className="btn" onClick={onTryAgain}>
             Try again
           </button>
         )}

@@ -1,6 +1,6 @@
 import { lazy, type ReactNode, Suspense, useEffect, useRef } from 'react';
 import { Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-router-dom';
-import { useIsLost, useMe } from '../../lib/session';
+import { useIsLost, useIsResuming, useMe } from '../../lib/session';
 import { AccountMenu } from './account-menu';
 import { OfflineBanner } from './offline-banner';
 import { Rail } from './rail';
@@ -12,14 +12,16 @@ const LostSession = lazy(async () => ({ default: (await import('./lost-session')
 export function Shell(): ReactNode {
   const me = useMe();
   const isLost = useIsLost();
+  const isResuming = useIsResuming();
+  const hasPlaces = isResuming || me !== null;
   const main = useFocusOnArrival();
   const isGoing = useNavigation().state === 'loading';
   return (
-    <div className={me ? classes['shell'] : undefined}>
+    <div className={hasPlaces ? classes['shell'] : undefined}>
       <a href="#page" className={classes['skip']}>
         Skip to the page
       </a>
-      {me && <Rail more={<AccountMenu shownAs="place" />} />}
+      {hasPlaces && <Rail more={<AccountMenu shownAs="place" />} />}
       <div className={classes['beside']}>
         <TopBar />
         <OfflineBanner />

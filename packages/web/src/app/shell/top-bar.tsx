@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
-import { useMe } from '../../lib/session';
+import { useIsResuming, useMe } from '../../lib/session';
 import { AccountMenu } from './account-menu';
 import { Crumbs, PhoneCrumbs, useCrumbs } from './crumbs';
 import { FindField } from './find-field';
@@ -10,7 +10,9 @@ import classes from './top-bar.module.css';
 
 export function TopBar(): ReactNode {
   const crumbs = useCrumbs();
-  return useMe() ? (
+  const me = useMe();
+  const isResuming = useIsResuming();
+  return me || isResuming ? (
     <header className={classes['top']}>
       <Crumbs crumbs={crumbs} />
       <PhoneCrumbs crumbs={crumbs} />

@@ -31,7 +31,13 @@ export function SignInForm({ onSignedIn, email }: SignInFormProps): ReactNode {
         autoComplete="username"
         readOnly={email !== undefined}
       />
-      <TextField {...field('password')} label="Password" type="password" autoComplete="current-password" />
+      <TextField
+        {...field('password')}
+        label="Password"
+        type="password"
+        autoComplete="current-password"
+        data-autofocus={email !== undefined || undefined}
+      />
       <SendButton isSending={isSending}>Sign in</SendButton>
     </form>
   );
