@@ -12,6 +12,7 @@ import {
   presentRow,
 } from '../features/questions/question-rows.js';
 import * as sql from '../features/questions/questions.sql.js';
+import { ON_QUESTION } from '../features/photos/photos.sql.js';
 import { QUESTION_OF_HIT, SEARCH } from '../features/search/search.sql.js';
 import { SearchIndexService } from '../features/search/search-index.service.js';
 
@@ -49,11 +50,10 @@ function sheet(id: string): unknown {
     holes: JSON.parse(row['holes']!),
     holeCard: JSON.parse(row['holeCard']!),
     fitCheck: JSON.parse(row['fitCheck']!),
+    photos: reader.all(ON_QUESTION, [id]),
     fixes: reader.all(sql.FIXES, [id]),
-    stamps: reader.all(sql.STAMPS, [id]),
-    objections: reader.all(sql.OBJECTIONS, [id]),
     referral: reader.get(sql.REFERRAL, [id]) ?? null,
-    completion: reader.get(sql.COMPLETION, [id]) ?? null,
+    completion: null,
     events: events.reverse().map(presentEvent),
   };
 }

@@ -23,10 +23,16 @@ export interface BenchWorld {
 
 const SECTIONS = 10;
 const CHAPTERS = 5;
-const WORDS =
+const TRADE =
   'spar rib skin hole edge rivet shop head drill burr doubler flange web bend crack clearance nutplate gap row pitch'.split(
     ' ',
   );
+const SYLLABLES = 'ba ce di fo gu la me ni po ru sa te vi zo'.split(' ');
+/** Few words are said often and many seldom, as in any talk. */
+const WORDS = [
+  ...TRADE,
+  ...SYLLABLES.flatMap((a) => SYLLABLES.flatMap((b) => SYLLABLES.map((c) => a + b + c))),
+];
 const START = Date.parse('2024-01-01T00:00:00.000Z');
 const SECRET = 'a secret for measuring only, long enough';
 
@@ -183,7 +189,8 @@ export async function seedBench(dataDir: string, questions: number, events: numb
 
 const index = new SearchIndexService();
 const lot = lots();
-const sentence = (words: number) => Array.from({ length: words }, () => WORDS[lot(WORDS.length)]).join(' ');
+const word = () => WORDS[Math.floor((lot(1_000_000) / 1_000_000) ** 2 * WORDS.length)];
+const sentence = (words: number) => Array.from({ length: words }, word).join(' ');
 
 interface Filling {
   readonly number: number;

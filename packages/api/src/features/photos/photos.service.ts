@@ -13,13 +13,8 @@ import { PhotoStore } from './photo-store.js';
 import { type PhotoRow, PhotoUrlsService } from './photo-urls.service.js';
 import { PhotoUseEntity } from './photo-use.entity.js';
 import { PhotoEntity } from './photo.entity.js';
+import { ON_QUESTION, ONE, UNUSED } from './photos.sql.js';
 
-const COLUMNS = `p."id", p."width", p."height", p."bytes", p."contentType", p."caption", p."marks"`;
-const ONE = `SELECT ${COLUMNS}, p."ownerId" FROM "photos" p WHERE p."id" = ?`;
-const ON_QUESTION = `SELECT ${COLUMNS}, u."usedIn" FROM "photo_uses" u JOIN "photos" p ON p."id" = u."photoId"
-  WHERE u."questionId" = ? ORDER BY u."usedIn", u."position"`;
-const UNUSED = `SELECT p."id" FROM "photos" p LEFT JOIN "photo_uses" u ON u."photoId" = p."id"
-  WHERE u."photoId" IS NULL AND p."storedAt" < ? LIMIT 200`;
 const DAY_MS = 86_400_000;
 
 export interface Attachment {

@@ -10,7 +10,7 @@ import {
 } from '@rivetside/shared';
 import { PreparedReader } from '../../common/database/prepared-reader.js';
 import { NotFound } from '../../common/errors/app-error.js';
-import { BUILDERS_OF_BUILD, CHAPTERS_OF_KIT, KITS_OF_CHAPTERS, STANDING } from './questions.sql.js';
+import { KITS_OF_CHAPTERS, STANDING } from './questions.sql.js';
 
 interface StandingRow {
   id: string;
@@ -27,6 +27,9 @@ interface StandingRow {
   critical: number;
   holeCard: string | null;
   holeLineId: string | null;
+  /** JSON lists of ids. */
+  kitChapterIds: string;
+  builderIds: string;
 }
 
 /** A question as policies and writes need it. */
@@ -55,8 +58,8 @@ export class QuestionDoorService {
       ...facts,
       critical: critical === 1,
       holeCardText: holeCard,
-      kitChapterIds: this.chaptersOfKit(row.kitId),
-      builderIds: this.buildersOf(row),
+      kitChapterIds: JSON.parse(row.kitChapterIds) as string[],
+      builderIds: JSON.parse(row.builderIds) as string[],
     };
   }
 
@@ -71,16 +74,6 @@ export class QuestionDoorService {
     const chapters = JSON.stringify(activeChapterIds(actor));
     const kits = this.reader.all<{ kitId: string }>(KITS_OF_CHAPTERS, [chapters]).map(({ kitId }) => kitId);
     return { chapters, kits: JSON.stringify(kits), everything: actor.siteRole !== null };
-  }
-
-  private chaptersOfKit(kitId: string): string[] {
-    return this.reader.all<{ chapterId: string }>(CHAPTERS_OF_KIT, [kitId]).map(({ chapterId }) => chapterId);
-  }
-
-  private buildersOf({ buildId, askedById }: StandingRow): string[] {
-    if (buildId === null) return [askedById];
-    const ids = this.reader.all<{ id: string }>(BUILDERS_OF_BUILD, { id: buildId }).map(({ id }) => id);
-    return ids.includes(askedById) ? ids : [...ids, askedById];
   }
 }
 

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import {
   type Actor,
+  canSeeQuestion,
   EVENTS_ON_SHEET,
   EVENTS_PER_PAGE,
   type EventsQuery,
@@ -13,9 +14,10 @@ import {
   type SheetEvent,
 } from '@rivetside/shared';
 import { PreparedReader } from '../../common/database/prepared-reader.js';
+import { NotFound } from '../../common/errors/app-error.js';
 import { Clock } from '../../common/time/clock.js';
 import { PhotosService } from '../photos/photos.service.js';
-import { type KnownQuestion, QuestionDoorService } from './question-door.service.js';
+import { QuestionDoorService } from './question-door.service.js';
 import { type EventRow, type ListRow, presentEvent, presentRow } from './question-rows.js';
 import * as sql from './questions.sql.js';
 import {
@@ -39,6 +41,8 @@ interface SheetRow extends ListRow {
   fitCheck: string | null;
   withdrawnAt: string | null;
   withdrawnReason: string | null;
+  kitChapterIds: string;
+  builderIds: string;
   kitName: string;
   stepId: string | null;
   stepCode: string;
@@ -66,10 +70,11 @@ export class QuestionSheetService {
   ) {}
 
   read(actor: Actor, id: string): Question {
-    const known = this.door.requireVisible(actor, id);
-    const row = this.reader.get<SheetRow>(sql.SHEET, { id, userId: actor.id })!;
+    const row = this.requireVisible(actor, id);
     const photos = this.photos.ofQuestion(id);
-    const completion = this.reader.get<CompletionRow>(sql.COMPLETION, [id]);
+    const fixes = this.fixes(id);
+    // Nothing is carried out but a fix.
+    const completion = fixes.length > 0 ? this.reader.get<CompletionRow>(sql.COMPLETION, [id]) : undefined;
     const referral = this.reader.get<ReferralRow>(sql.REFERRAL, [id]);
     return {
       ...presentRow(row),
@@ -78,11 +83,11 @@ export class QuestionSheetService {
       kitName: row.kitName,
       holes: JSON.parse(row.holes) as HolePlace[],
       buildId: row.buildId,
-      builderIds: [...known.builderIds],
+      builderIds: JSON.parse(row.builderIds) as string[],
       holeCard: parsed<HoleCard>(row.holeCard),
       fitCheck: parsed<FitCheck>(row.fitCheck),
       photos: photos.get('question') ?? [],
-      fixes: this.fixes(id),
+      fixes,
       referral: referral ? presentReferral(referral) : null,
       completion: completion ? presentCompletion(completion, photos.get(completion.id) ?? []) : null,
       withdrawn: row.withdrawnAt === null ? null : { at: row.withdrawnAt, reason: row.withdrawnReason ?? '' },
@@ -107,12 +112,14 @@ export class QuestionSheetService {
   }
 
   fixes(questionId: string): Fix[] {
+    const rows = this.reader.all<FixRow>(sql.FIXES, [questionId]);
+    if (rows.length === 0) return [];
     const today = this.clock.instant().slice(0, 10);
     const stamps = this.reader
       .all<StampRow>(sql.STAMPS, [questionId])
       .map((row) => presentStamp(row, today, (userId) => this.nameOf(userId)));
     const objections = this.reader.all<ObjectionRow>(sql.OBJECTIONS, [questionId]).map(presentObjection);
-    return this.reader.all<FixRow>(sql.FIXES, [questionId]).map((row) =>
+    return rows.map((row) =>
       presentFix(
         row,
         stamps.filter(({ fixId }) => fixId === row.id),
@@ -121,9 +128,11 @@ export class QuestionSheetService {
     );
   }
 
-  /** The sheet for whoever has just written on it, after the commit. */
-  known(id: string): KnownQuestion {
-    return this.door.find(id)!;
+  private requireVisible(actor: Actor, id: string): SheetRow {
+    const row = this.reader.get<SheetRow>(sql.SHEET, { id, userId: actor.id });
+    const sight = row && { ...row, kitChapterIds: JSON.parse(row.kitChapterIds) as string[] };
+    if (!sight || !canSeeQuestion(actor, sight)) throw new NotFound('question');
+    return row;
   }
 
   private newest(id: string, photos: Map<string, Photo[]>): SheetEvent[] {
