@@ -180,12 +180,12 @@ describe('UnitOfWork', () => {
     const much = units.runPrepared((db) => {
       for (let at = 0; at < 2_000; at += 1) db.run(INSERT, [`full ${at} ${'x'.repeat(500)}`]);
     });
-    await expect(much).rejects.toMatchObject({ code: 'SQLITE_FULL' });
+    await expect(much).rejects.toThrow('database or disk is full');
     const muchByEntities = units.run(async (tx) => {
       for (let at = 0; at < 300; at += 1)
         await tx.manager.insert(OutboxEntity, mail(`full ${at} ${'x'.repeat(4_000)}`));
     });
-    await expect(muchByEntities).rejects.toMatchObject({ code: 'SQLITE_FULL' });
+    await expect(muchByEntities).rejects.toThrow('database or disk is full');
     expect(kept()).toEqual(['before']);
 
     await allow(1_000_000);

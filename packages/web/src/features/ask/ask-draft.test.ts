@@ -10,7 +10,7 @@ import {
   withMishap,
 } from './ask-draft';
 
-const nowhere = { ...blankDraft('key').place, kitId: 'kit' };
+const nowhere = { ...blankDraft().place, kitId: 'kit' };
 const line = (id: string, stepId: string | null, ...parts: string[]) =>
   ({ id, sectionId: 'stab', stepId, stack: parts.map((partId) => ({ partId })) }) as HoleLine;
 const section = {
@@ -65,7 +65,7 @@ it('offers the hole lines of the step and through the part', () => {
 });
 
 it('brings the usual discipline along with the mishap, but leaves one that was chosen', () => {
-  const first = withMishap(blankDraft('key'), 'badRivet');
+  const first = withMishap(blankDraft(), 'badRivet');
   expect(first.discipline).toBe('riveting');
   expect(withMishap(first, 'sealantOrLeak').discipline).toBe('sealant');
   const chosen = { ...first, discipline: 'corrosion' as const, isDisciplineChosen: true };

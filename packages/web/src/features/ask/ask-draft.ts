@@ -1,5 +1,6 @@
 import {
   USUAL_DISCIPLINE,
+  type AskQuestion,
   type Audience,
   type Discipline,
   type HoleLine,
@@ -27,7 +28,8 @@ export interface AskedPlace {
 /** A question as it is being written. `C` is the hole card's form, `P` a photo of the draft: each its own feature's. */
 export interface AskDraft<C = unknown, P = unknown> {
   readonly place: AskedPlace;
-  readonly buildId: string | null;
+  /** Undefined until it is chosen: then the asker's own build counts; null is none of them. */
+  readonly buildId: string | null | undefined;
   readonly chapterId: string | null;
   readonly audience: Audience;
   readonly mishap: Mishap | null;
@@ -38,11 +40,16 @@ export interface AskDraft<C = unknown, P = unknown> {
   readonly body: string;
   readonly holeCard: C | null;
   readonly photos: readonly P[];
-  /** Idempotency-Key of the question: one question, however often it is sent. */
-  readonly key: string;
+  /**
+   * Put to the mentors and not answered yet: the question as it was then, all but the photos, whose names come with
+   * their sending. What is sent again after a lost answer has to be the same to the letter.
+   */
+  readonly handedOver: HandedOver | null;
 }
 
-const NOWHERE: AskedPlace = {
+export type HandedOver = Omit<AskQuestion, 'photoIds'>;
+
+export const NOWHERE: AskedPlace = {
   kitId: null,
   wholeBuild: false,
   sectionId: null,
@@ -53,10 +60,10 @@ const NOWHERE: AskedPlace = {
   holes: '',
 };
 
-export function blankDraft<C, P>(key: string): AskDraft<C, P> {
+export function blankDraft<C, P>(): AskDraft<C, P> {
   return {
     place: NOWHERE,
-    buildId: null,
+    buildId: undefined,
     chapterId: null,
     audience: 'chapter',
     mishap: null,
@@ -66,7 +73,7 @@ export function blankDraft<C, P>(key: string): AskDraft<C, P> {
     body: '',
     holeCard: null,
     photos: [],
-    key,
+    handedOver: null,
   };
 }
 
