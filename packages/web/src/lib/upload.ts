@@ -14,17 +14,18 @@ interface Uploading {
 function sendOnce(file: Blob, key: string, { onProgress, signal }: Uploading): Promise<XMLHttpRequest> {
   return new Promise((resolve, reject) => {
     const request = new XMLHttpRequest();
-    const stop = () => request.abort();
-    const stopped = () => reject(new DOMException('The upload was stopped.', 'AbortError'));
-    if (signal?.aborted) return stopped();
-    signal?.addEventListener('abort', stop, { once: true });
-    request.upload.onprogress = ({ loaded, total, lengthComputable }) => {
-      if (lengthComputable && total > 0) onProgress?.(loaded / total);
+    const stop = () => {
+      request.abort();
+      reject(new DOMException('The upload was stopped.', 'AbortError'));
     };
-    request.onload = () => resolve(request);
-    request.onerror = () => reject(Problem.noNetwork());
-    request.onabort = stopped;
-    request.onloadend = () => signal?.removeEventListener('abort', stop);
+    if (signal?.aborted) return stop();
+    signal?.addEventListener('abort', stop, { once: true });
+    request.upload.addEventListener('progress', ({ loaded, total, lengthComputable }) => {
+      if (lengthComputable && total > 0) onProgress?.(loaded / total);
+    });
+    request.addEventListener('load', () => resolve(request));
+    request.addEventListener('error', () => reject(Problem.noNetwork()));
+    request.addEventListener('loadend', () => signal?.removeEventListener('abort', stop));
     request.open('POST', '/api/photos');
     request.setRequestHeader('idempotency-key', key);
     const token = access.token();

@@ -25,3 +25,30 @@ Object.assign(window, {
   scrollTo: () => undefined,
 });
 Element.prototype.scrollIntoView = () => undefined;
+
+// jsdom's files cannot be read as a stream, and without that an upload to msw never arrives.
+function bytesOf(file: Blob): Promise<ArrayBuffer> {
+  return new Promise((resolve, reject) => {
+    const reader = new FileReader();
+    reader.onload = () => resolve(reader.result as ArrayBuffer);
+    reader.onerror = () => reject(reader.error);
+    reader.readAsArrayBuffer(file);
+  });
+}
+
+Object.assign(Blob.prototype, {
+  arrayBuffer(this: Blob) {
+    return bytesOf(this);
+  },
+  async text(this: Blob) {
+    return new TextDecoder().decode(await bytesOf(this));
+  },
+  stream(this: Blob) {
+    return new ReadableStream({
+      start: async (controller) => {
+        controller.enqueue(new Uint8Array(await bytesOf(this)));
+        controller.close();
+      },
+    });
+  },
+});
