@@ -9,6 +9,7 @@ const me = createStore<Me | null>(null);
 /** Somebody was signed in on this device and the server has not said yet whether they still are. */
 const resuming = createStore(access.wasSignedIn());
 let starting: Promise<Me | null> | null = null;
+let isLeaving = false;
 
 function enter(signedIn: SignedIn): Me {
   access.take(signedIn);
@@ -27,7 +28,7 @@ async function resume(): Promise<Me | null> {
 
 /** Who is signed in on this page. */
 export const session = {
-  me: me.get,
+  me: (): Me | null => (isLeaving ? null : me.get()),
   onChange: me.subscribe,
 
   /** Takes up an earlier session, once; a failed try, as without a network, may be made again. */
@@ -49,13 +50,23 @@ export const session = {
   },
 
   /** Out on this page whatever the server says: a shared machine in a hangar must not stay signed in. */
-  async signOut(): Promise<void> {
-    const done = api.post('/auth/sign-out');
-    await done.catch(() => undefined);
-    session.end();
+  async signOut(goAway: () => void | Promise<void>): Promise<void> {
+    await api.post('/auth/sign-out').catch(() => undefined);
+    await session.leave(goAway);
+  },
+
+  /** The page shown is left first: it could not be drawn without whoever it is for. */
+  async leave(goAway: () => void | Promise<void>): Promise<void> {
+    isLeaving = true;
+    try {
+      await goAway();
+    } finally {
+      session.end();
+    }
   },
 
   end(): void {
+    isLeaving = false;
     starting = Promise.resolve(null);
     access.drop();
     me.set(null);

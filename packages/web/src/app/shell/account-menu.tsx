@@ -22,8 +22,7 @@ function Lines({ close }: { readonly close: () => void }): ReactNode {
   const { colorScheme, setColorScheme } = useMantineColorScheme();
   const signOut = async () => {
     close();
-    await session.signOut();
-    await navigate('/');
+    await session.signOut(() => navigate('/'));
   };
   return (
     <>

@@ -15,10 +15,7 @@ import classes from './lost-session.module.css';
 /** Over the page and not in its place: what was typed below stays, and what was being sent goes on. */
 export function LostSession({ me }: { readonly me: Me }): ReactNode {
   const navigate = useNavigate();
-  const leave = async () => {
-    session.end();
-    await navigate('/sign-in');
-  };
+  const leave = () => session.leave(() => navigate('/sign-in'));
   return (
     <Modal
       opened

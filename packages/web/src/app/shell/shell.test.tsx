@@ -114,11 +114,15 @@ it('opens the account menu by keyboard, and Escape closes it and gives the focus
 it('signs out on this page even when the server cannot be told', async () => {
   withBuilds();
   server.use(http.post('*/api/auth/sign-out', () => HttpResponse.error()));
-  const { user, router, queryClient } = renderRoute('/stop');
+  server.use(http.get('*/api/me/sessions', () => HttpResponse.json({ items: [], nextCursor: null })));
+  const complaint = jest.spyOn(console, 'error');
+  const { user, router, queryClient } = renderRoute('/account');
   await user.click(await screen.findByRole('button', { name: 'Ottoline Brackwater: your account' }));
   await user.click(screen.getByRole('button', { name: 'Sign out' }));
   await waitFor(() => expect(router.state.location.pathname).toBe('/'));
-  expect(session.me()).toBeNull();
+  await waitFor(() => expect(session.me()).toBeNull());
+  expect(await screen.findByRole('heading', { name: /second pair of hands/ })).toBeInTheDocument();
+  expect(complaint).not.toHaveBeenCalled();
   expect(queryClient.getQueryCache().getAll()).toEqual([]);
 });
 

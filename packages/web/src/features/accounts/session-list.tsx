@@ -1,6 +1,7 @@
 import type { Session } from '@rivetside/shared';
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
+import { useNavigate } from 'react-router-dom';
 import { api } from '../../lib/api';
 import { sentenceOf } from '../../lib/problem';
 import { session } from '../../lib/session';
@@ -58,10 +59,11 @@ function Device({ device, onEnd }: { readonly device: Session; readonly onEnd: (
 
 function useEndSession() {
   const queryClient = useQueryClient();
+  const navigate = useNavigate();
   return useMutation({
     mutationFn: async (which: Session | 'others') => {
       if (which === 'others') await api.delete('/me/sessions');
-      else if (which.current) await session.signOut();
+      else if (which.current) await session.signOut(() => navigate('/'));
       else await api.delete(`/me/sessions/${which.id}`);
     },
     onSuccess: () =>
