@@ -88,6 +88,11 @@ export function withMishap<D extends AskDraft>(draft: D, mishap: Mishap): D {
   return { ...draft, mishap, discipline };
 }
 
+/** Another kit: nothing of the old one lies in it. */
+export function inKit(place: AskedPlace, kitId: string): AskedPlace {
+  return place.kitId === kitId ? place : { ...NOWHERE, kitId };
+}
+
 /** Another section: what was chosen within the old one does not lie in it. */
 export function inSection(place: AskedPlace, sectionId: string | null): AskedPlace {
   if (place.sectionId === sectionId && !place.wholeBuild) return place;
@@ -134,4 +139,12 @@ export function fittingLines(section: Section | undefined, { stepId, partId }: A
       (!stepId || line.stepId === null || line.stepId === stepId) &&
       (!partId || line.stack.some((part) => part.partId === partId)),
   );
+}
+
+/** What was changed in `next` of the draft as it was shown; what was filled in as usual and stands is not kept as chosen. */
+export function changedFrom<D extends AskDraft>(shown: D, next: D): Partial<D> {
+  const keys = Object.keys(next) as (keyof D)[];
+  return Object.fromEntries(
+    keys.filter((key) => next[key] !== shown[key]).map((key) => [key, next[key]]),
+  ) as Partial<D>;
 }

@@ -14,8 +14,14 @@ function alikeWords({ alikeIn, differsIn, question }: SimilarQuestion): string {
     .join(' · ');
 }
 
+interface MetBeforeProps {
+  readonly found: readonly SimilarQuestion[] | undefined;
+  readonly isError: boolean;
+}
+
 /** Questions met before that are like this one, drawn to one scale, with what is alike and what differs in words. */
-export function MetBefore({ found }: { found: readonly SimilarQuestion[] | undefined }): ReactNode {
+export function MetBefore({ found, isError }: MetBeforeProps): ReactNode {
+  if (isError && !found) return <p className={classes['quiet']}>Could not be looked for just now.</p>;
   if (!found) return <p className={classes['quiet']}>Looked for as you type.</p>;
   if (found.length === 0) return <p className={classes['quiet']}>Nothing like it was met here yet.</p>;
   return (

@@ -2,6 +2,7 @@ import {
   formatLength,
   rivetCallOut,
   type HoleLine,
+  type Kit,
   type Section,
   type SectionSummary,
   type Units,
@@ -11,6 +12,7 @@ import { ChoiceField, TextField, TickField } from '../../components/field';
 import classes from './ask.module.css';
 import {
   aboutWholeBuild,
+  inKit,
   atPart,
   atStep,
   fittingLines,
@@ -22,6 +24,7 @@ import {
 export interface WhereCardProps {
   readonly place: AskedPlace;
   readonly onChange: (place: AskedPlace) => void;
+  readonly kits: readonly Kit[];
   readonly sections: readonly SectionSummary[];
   /** The chosen section with its steps, parts and hole lines, once it is loaded. */
   readonly section: Section | undefined;
@@ -127,11 +130,21 @@ function WithinSection(props: WhereCardProps): ReactNode {
 
 /** Where on the kit: by the plan, by section, step, part and hole line, which fill each other in, or by part number. */
 export function WhereCard(props: WhereCardProps): ReactNode {
-  const { place, onChange, sections, plan, partFinder, errors } = props;
+  const { place, onChange, kits, sections, plan, partFinder, errors } = props;
   return (
     <div className={classes['where']}>
       <div className={classes['plan']}>{plan}</div>
       <div className={classes['stackOfFields']}>
+        {kits.length > 1 && (
+          <ChoiceField
+            label="Kit"
+            value={place.kitId ?? ''}
+            field="kitId"
+            error={errors['kitId']}
+            choices={kits.map(({ id, name }) => ({ value: id, label: name }))}
+            onChange={(id) => onChange(inKit(place, id))}
+          />
+        )}
         <TickField
           label="It is about the whole build, not one section"
           isOn={place.wholeBuild}
