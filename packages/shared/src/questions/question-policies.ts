@@ -30,7 +30,7 @@ export function canSeeQuestion(
 }
 
 /** A builder asks in a chapter where they are one. */
-export function canAskIn(actor: Actor, chapterId: string): boolean {
+export function canAskIn(actor: Pick<Actor, 'memberships'>, chapterId: string): boolean {
   return isBuilderIn(actor, chapterId);
 }
 
@@ -111,6 +111,6 @@ export function canWithdrawQuestion(actor: Actor, question: QuestionStanding): b
 }
 
 /** A mentor somewhere has a desk. */
-export function hasDesk(actor: Actor): boolean {
+export function hasDesk(actor: Pick<Actor, 'memberships'>): boolean {
   return actor.memberships.some((one) => one.status === 'active' && one.roles.includes('mentor'));
 }

@@ -46,6 +46,8 @@ describe('searchTerms', () => {
 describe('searchQuery', () => {
   it('quotes every term and lets the last word be a beginning', () =>
     expect(searchQuery('doubler cresc')).toBe('"doubler" AND "cresc"*'));
+  it('asks for any of the terms where told', () =>
+    expect(searchQuery('doubler cresc', 'any')).toBe('"doubler" OR "cresc"*'));
   it('is null where there is nothing to search', () => expect(searchQuery(' -- "" ')).toBeNull());
   it('takes an operator for a word', () => expect(searchQuery('NEAR OR')).toBe('"near" AND "or"*'));
 });

@@ -75,12 +75,14 @@ export function searchTerms(text: string): SearchTerms {
 
 /**
  * The full-text query for what somebody typed; null when nothing in it can be searched. Every term is quoted, so
- * nothing typed is read as an operator; the last word may be the beginning of one.
+ * nothing typed is read as an operator; the last word may be the beginning of one. With `any` one term is enough, for
+ * when nothing holds them all.
  */
-export function searchQuery(text: string): string | null {
+export function searchQuery(text: string, terms: 'all' | 'any' = 'all'): string | null {
   const { words, numbers } = searchTerms(text);
-  const all = [...words, ...numbers].slice(0, SEARCH_TERMS_MAX);
-  if (all.length === 0) return null;
+  const wanted = [...words, ...numbers].slice(0, SEARCH_TERMS_MAX);
+  if (wanted.length === 0) return null;
   const lastWord = words.at(-1);
-  return all.map((term) => (term === lastWord && term.length > 1 ? `"${term}"*` : `"${term}"`)).join(' AND ');
+  const quoted = wanted.map((term) => (term === lastWord && term.length > 1 ? `"${term}"*` : `"${term}"`));
+  return quoted.join(terms === 'all' ? ' AND ' : ' OR ');
 }

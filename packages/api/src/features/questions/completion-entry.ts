@@ -3,7 +3,7 @@ import type { CompletionEntity } from './completion.entity.js';
 
 const inches = (value: number) => value.toFixed(3);
 
-function measured({ asDone }: CompletionEntity): string {
+function measured({ asDone }: Pick<CompletionEntity, 'asDone'>): string {
   const { finalDrill, edgeDistances = [], shopHead, rivetLengthDash, readings = [] } = asDone;
   return [
     finalDrill && `final drill ${finalDrill}`,
@@ -19,7 +19,11 @@ function measured({ asDone }: CompletionEntity): string {
 }
 
 /** Found, did, basis, measured, left open: what an inspector reads first, as it stood when it was done. */
-export function entryLines(sheet: Question, fix: Fix, completion: CompletionEntity): EntryLine[] {
+export function entryLines(
+  { title }: Pick<Question, 'title'>,
+  fix: Fix,
+  completion: Pick<CompletionEntity, 'asDone' | 'conditionsMet' | 'conditionsLeft' | 'note'>,
+): EntryLine[] {
   const stamps = fix.endorsements.filter(({ state }) => state === 'live');
   const basis = stamps
     .map(({ stampNumber, by, basis: on, reference, givenAt }) =>
@@ -29,7 +33,7 @@ export function entryLines(sheet: Question, fix: Fix, completion: CompletionEnti
     )
     .join('; ');
   const lines = [
-    { label: 'Found', text: sheet.title },
+    { label: 'Found', text: title },
     { label: 'Did', text: fix.operations.map(({ no, text }) => `Op ${no} ${text}`).join(' ') },
     { label: 'Basis', text: basis },
     { label: 'Measured', text: measured(completion) },
@@ -38,4 +42,10 @@ export function entryLines(sheet: Question, fix: Fix, completion: CompletionEnti
     { label: 'Note', text: completion.note ?? '' },
   ];
   return lines.filter(({ text }) => text !== '');
+}
+
+/** The fix's own conditions and those of the stamps that stand. */
+export function conditionsOf(fix: Fix): string[] {
+  const live = fix.endorsements.filter(({ state }) => state === 'live');
+  return [...new Set([...fix.conditions, ...live.flatMap(({ conditions }) => conditions)])];
 }

@@ -16,7 +16,7 @@ import { Clock } from '../../common/time/clock.js';
 import { BuildsService } from '../builds/builds.service.js';
 import { PhotosService } from '../photos/photos.service.js';
 import { CompletionEntity } from './completion.entity.js';
-import { entryLines } from './completion-entry.js';
+import { conditionsOf, entryLines } from './completion-entry.js';
 import { type KnownQuestion, QuestionDoorService } from './question-door.service.js';
 import { QuestionLogService } from './question-log.service.js';
 import { QuestionSheetService } from './question-sheet.service.js';
@@ -148,12 +148,6 @@ export class CompletionService {
       });
     }
   }
-}
-
-/** The fix's own conditions and those of the stamps that stand. */
-function conditionsOf(fix: Fix): string[] {
-  const live = fix.endorsements.filter(({ state }) => state === 'live');
-  return [...new Set([...fix.conditions, ...live.flatMap(({ conditions }) => conditions)])];
 }
 
 function asText({ asDone, check, conditionsMet, conditionsLeft, helpers }: CompletionEntity) {

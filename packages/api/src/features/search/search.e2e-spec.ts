@@ -49,6 +49,12 @@ describe('search', () => {
     expect(ids(await search(bench.builder, '0.388'))).not.toContain(question.id);
   });
 
+  it('falls back to any of the words where nothing holds them all', async () => {
+    const question = await test.create.question(bench, { title: 'Bellcrank arm is bent at the root' });
+    expect(ids(await search(bench.builder, 'bellcrank unobtainium'))).toEqual([question.id]);
+    expect(await search(bench.builder, 'unobtainium')).toEqual([]);
+  });
+
   it('marks what was found without a tag of its own making', async () => {
     await test.create.question(bench, { title: 'Gusset <b>cracked</b> at the corner' });
     const [hit] = await search(bench.builder, 'gusset');

@@ -69,16 +69,14 @@ export class SearchService {
     );
   }
 
+  /** What was asked may hold one of the words and its fix another: where nothing holds all, any of them counts. */
   private rows(actor: Actor, q: string): HitRow[] {
-    const match = searchQuery(q);
-    if (match === null) return [];
     const { chapters, kits } = this.within(actor);
-    return this.reader.all<HitRow>(SEARCH, [
-      match,
-      JSON.stringify(chapters),
-      JSON.stringify(kits),
-      ROWS_LOOKED_AT,
-    ]);
+    const sight = [JSON.stringify(chapters), JSON.stringify(kits), ROWS_LOOKED_AT];
+    const matching = (query: string | null) =>
+      query === null ? [] : this.reader.all<HitRow>(SEARCH, [query, ...sight]);
+    const all = matching(searchQuery(q));
+    return all.length > 0 ? all : matching(searchQuery(q, 'any'));
   }
 
   private within(actor: Actor): { chapters: string[]; kits: string[] } {
