@@ -1,0 +1,98 @@
+import type { OpenItem } from '@rivetside/shared';
+import { lazy, type ReactNode, Suspense, useRef, useState } from 'react';
+import { Link } from 'react-router-dom';
+import { useTimes } from '../../lib/times';
+import classes from './record.module.css';
+
+const ClearDialog = lazy(async () => ({ default: (await import('./clear-dialog')).ClearDialog }));
+
+interface OpenItemsProps {
+  readonly items: readonly OpenItem[];
+  readonly label: string;
+  /** Owner and crew clear; others read. */
+  readonly mayClear: boolean;
+}
+
+/** What must be cleared before a section is closed. */
+export function OpenItems({ items, label, mayClear }: OpenItemsProps): ReactNode {
+  const [clearing, setClearing] = useState<OpenItem | null>(null);
+  const [cleared, setCleared] = useState('');
+  const list = useRef<HTMLDivElement>(null);
+  const handleCleared = (item: OpenItem) => {
+    setClearing(null);
+    setCleared(`Cleared: ${item.text}`);
+    // Its button is gone: the focus would fall to the top of the page.
+    list.current?.focus();
+  };
+  return (
+    <div ref={list} tabIndex={-1} className={classes['openItems']}>
+      <p role="status" className="unseen">
+        {cleared}
+      </p>
+      <ul className={classes['list']} aria-label={label}>
+        {items.map((item) => (
+          <li key={item.id} className={classes['item']}>
+            <ItemWords item={item} />
+            {mayClear && (
+              <button
+                type="button"
+                className="btn plain"
+                aria-label={`Clear: ${item.text}`}
+                onClick={() => setClearing(item)}
+              >
+                Clear
+              </button>
+            )}
+          </li>
+        ))}
+      </ul>
+      {clearing && (
+        <Suspense>
+          <ClearDialog item={clearing} onClose={() => setClearing(null)} onCleared={handleCleared} />
+        </Suspense>
+      )}
+    </div>
+  );
+}
+
+function ItemWords({ item }: { readonly item: OpenItem }): ReactNode {
+  const { date } = useTimes();
+  const { text, sectionName, due, raisedAt, questionId } = item;
+  return (
+    <div>
+      <b>{text}</b>
+      <small>
+        {[sectionName, due && `due ${due}`, `raised ${date(raisedAt)}`].filter(Boolean).join(' · ')}
+        {questionId && (
+          <>
+            {' · '}
+            <Link to={`/questions/${questionId}`}>its question</Link>
+          </>
+        )}
+      </small>
+    </div>
+  );
+}
+
+/** What was cleared stays readable, with what was done. */
+export function ClearedItems({ items }: { readonly items: readonly OpenItem[] }): ReactNode {
+  const { date } = useTimes();
+  return (
+    <details className={classes['cleared']}>
+      <summary>{items.length === 1 ? 'One cleared' : `${items.length} cleared`}</summary>
+      <ul className={classes['list']} aria-label="Cleared items">
+        {items.map(({ id, text, clearedAt, clearedNote }) => (
+          <li key={id} className={classes['item']}>
+            <div>
+              <b>{text}</b>
+              <small>
+                {clearedAt && `cleared ${date(clearedAt)}`}
+                {clearedNote && `: ${clearedNote}`}
+              </small>
+            </div>
+          </li>
+        ))}
+      </ul>
+    </details>
+  );
+}
