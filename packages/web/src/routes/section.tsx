@@ -1,3 +1,112 @@
+import { canAskIn, type Section, type Step } from '@rivetside/shared';
+import type { QueryClient } from '@tanstack/react-query';
+import { useQuery } from '@tanstack/react-query';
+import { Link, type LoaderFunctionArgs, useParams } from 'react-router-dom';
+import { PageCard } from '../components/page-card';
+import { ErrorPage } from '../components/pages/error-page';
+import { NotFoundPage } from '../components/pages/not-found-page';
+import { PlanLocator } from '../components/plan-locator';
+import { CardSkeleton } from '../components/skeletons';
+import { ownBuilds, sectionProgress, useSetProgress } from '../features/builds/queries';
+import { StepState } from '../features/builds/step-state';
+import { sectionLine } from '../features/kits/plan-fills';
+import { kitKeys, sectionById } from '../features/kits/queries';
+import { SectionTabs } from '../features/kits/section-tabs';
+import classes from '../features/kits/kits.module.css';
+import { useLiveQuestions } from '../features/questions/use-live-questions';
+import { usePageTitle } from '../lib/page-title';
+import { Problem } from '../lib/problem';
+import { useActor } from '../lib/session';
+
+export const handle = { crumbs: () => [{ label: 'Kit', to: '/kit' }, { label: 'Section' }] };
+
+export const loader =
+  (queryClient: QueryClient) =>
+  ({ params }: LoaderFunctionArgs) => {
+    void queryClient.prefetchQuery(sectionById(params['sectionId']!));
+    void queryClient.prefetchQuery(ownBuilds);
+    return null;
+  };
+
+const MOVED = [kitKeys.sections];
+
 export function Component() {
-  return null;
+  const sectionId = useParams()['sectionId']!;
+  useLiveQuestions(MOVED);
+  const { data: section, error, refetch } = useQuery(sectionById(sectionId));
+  usePageTitle(section?.name ?? 'Section');
+  if (error instanceof Problem && error.status === 404) return <NotFoundPage what="section" />;
+  if (error && !section) return <ErrorPage error={error} onTryAgain={() => void refetch()} />;
+  if (!section) return <CardSkeleton lines={8} />;
+  return <SectionPage section={section} />;
+}
+
+function SectionPage({ section }: { readonly section: Section }) {
+  const me = useActor();
+  const builds = useQuery(ownBuilds).data?.items ?? [];
+  const build = builds.find(({ kitId, mine }) => mine && kitId === section.kitId);
+  const mayAsk = me.memberships.some(({ chapterId }) => canAskIn(me, chapterId));
+  return (
+    <div className={classes['column']}>
+      <PageCard
+        title={section.kitName}
+        aside={<Link to={`/kit/${section.kitId}?section=${section.id}`}>On the plan</Link>}
+      >
+        <div className={classes['head']}>
+          <PlanLocator regions={section.regions} size={150} />
+          <div className={classes['grow']}>
+            <h1>{section.name}</h1>
+            <p>
+              {section.code} · {sectionLine(section)}
+              {section.steward ? ` · kept by ${section.steward}` : ''}
+            </p>
+            {section.critical && <p>Critical: a fix here needs two stamps, none of them on experience.</p>}
+          </div>
+          <Link className="btn plain" to={`/questions?sectionId=${section.id}`}>
+            Questions here
+          </Link>
+          {mayAsk && (
+            <Link className="btn" to={`/stop?sectionId=${section.id}`}>
+              Something is wrong
+            </Link>
+          )}
+        </div>
+      </PageCard>
+      <PageCard title="What there is here">
+        {build ? (
+          <OwnTabs section={section} buildId={build.id} mayAsk={mayAsk} />
+        ) : (
+          <SectionTabs section={section} mayAsk={mayAsk} first="steps" />
+        )}
+      </PageCard>
+    </div>
+  );
+}
+
+interface OwnTabsProps {
+  readonly section: Section;
+  readonly buildId: string;
+  readonly mayAsk: boolean;
+}
+
+/** With how far one's own build has come, to be set step by step. */
+function OwnTabs({ section, buildId, mayAsk }: OwnTabsProps) {
+  const { data } = useQuery(sectionProgress(buildId, section.id));
+  const set = useSetProgress(buildId, section.id);
+  const states = new Map(data?.steps.map(({ stepId, state }) => [stepId, state]));
+  const progressOf = (step: Step) => (
+    <StepState
+      step={step}
+      state={states.get(step.id) ?? 'todo'}
+      onSet={(state) => set.mutate({ steps: [{ stepId: step.id, state }] })}
+    />
+  );
+  return (
+    <>
+      {set.error && (
+        <p role="alert">{(set.error as Partial<Problem>).title ?? 'That was not kept: try again.'}</p>
+      )}
+      <SectionTabs section={section} mayAsk={mayAsk} progressOf={progressOf} first="steps" />
+    </>
+  );
 }
