@@ -20,10 +20,12 @@ export function StopNotes({ codes }: { codes: readonly StopCode[] }): ReactNode 
 interface CheckNotesProps {
   readonly assumptions: readonly string[];
   readonly missing: readonly string[];
+  /** What opens the sums. */
+  readonly opener: 'figure' | 'result';
 }
 
 /** What nobody measured yet, what was taken as given, and what the whole check is not. */
-export function CheckNotes({ assumptions, missing }: CheckNotesProps): ReactNode {
+export function CheckNotes({ assumptions, missing, opener }: CheckNotesProps): ReactNode {
   return (
     <div className={classes['notes']}>
       {missing.length > 0 && (
@@ -47,7 +49,7 @@ export function CheckNotes({ assumptions, missing }: CheckNotesProps): ReactNode
         </>
       )}
       <p>
-        Each figure opens its formula, its source and its limit. Inside published numbers is not approval.
+        Each {opener} opens its formula, its source and its limit. Inside published numbers is not approval.
       </p>
     </div>
   );

@@ -54,6 +54,15 @@ it('opens a figure’s formula, limit, margin and source by keyboard, and closes
   expect(detail).not.toBeInTheDocument();
 });
 
+it('keeps to one line a remedy where there is little room, with every figure behind the result', async () => {
+  const user = userEvent.setup();
+  render(<FitCheckTable check={fitCheck(card(0.322, 0.005))} units="inch" compact />);
+  const row = screen.getByRole('row', { name: /^Next rivet size, AD5/ });
+  expect(within(row).getAllByRole('cell')).toHaveLength(1);
+  await user.click(within(row).getByRole('button'));
+  expect(screen.getByText(/e \/ D = 0\.3355 \/ 0\.15625 = 2\.1472, at least 2/)).toBeInTheDocument();
+});
+
 it('says how far a line is short', async () => {
   const user = userEvent.setup();
   const row = show(0.25);

@@ -17,21 +17,23 @@ import { Verdict } from './verdict';
 
 type Opened = { readonly kind: RemedyKind; readonly key: Figure['key'] | 'result' } | null;
 const HEADS = ['Remedy', ...Object.values(FIGURE_HEADS), 'Result'];
+const COMPACT_HEADS = ['Remedy', 'Result'];
 
 interface RowProps {
   readonly remedy: RemedyCheck;
   readonly units: Units;
   readonly isForemost: boolean;
+  readonly isCompact: boolean;
   readonly opened: Opened;
   readonly onOpen: (opened: Opened) => void;
 }
 
-function Row({ remedy, units, isForemost, opened, onOpen }: RowProps): ReactNode {
+function Row({ remedy, units, isForemost, isCompact, opened, onOpen }: RowProps): ReactNode {
   const id = useId();
   const { kind, verdict } = remedy;
   const headline = remedyHeadline(remedy, units);
   const name = remedyName(remedy);
-  const figures = figuresOf(remedy, units);
+  const figures = isCompact ? [] : figuresOf(remedy, units);
   const openKey = opened?.kind === kind ? opened.key : null;
   const lines = openKey === 'result' ? remedy.checks : figures.find(({ key }) => key === openKey)?.lines;
   const disclosure = (key: Figure['key'] | 'result') => ({
@@ -76,7 +78,7 @@ function Row({ remedy, units, isForemost, opened, onOpen }: RowProps): ReactNode
       </tr>
       {lines && (
         <tr role="row" className={classes['detail']}>
-          <td role="cell" id={id} colSpan={HEADS.length}>
+          <td role="cell" id={id} colSpan={figures.length + 2}>
             <CheckLines lines={lines} units={units} />
             {openKey === 'result' && remedy.remarks.map((remark) => <p key={remark}>{remark}</p>)}
           </td>
@@ -86,8 +88,15 @@ function Row({ remedy, units, isForemost, opened, onOpen }: RowProps): ReactNode
   );
 }
 
+interface FitCheckTableProps {
+  readonly check: FitCheck;
+  readonly units: Units;
+  /** One line a remedy: its figures are behind what decides it. */
+  readonly compact?: boolean;
+}
+
 /** Every remedy with its figures and what decides it. Each figure opens its formula, limit, margin and source. */
-export function FitCheckTable({ check, units }: { check: FitCheck; units: Units }): ReactNode {
+export function FitCheckTable({ check, units, compact = false }: FitCheckTableProps): ReactNode {
   const [opened, setOpened] = useState<Opened>(null);
   const foremost = foremostRemedy(check);
   return (
@@ -96,7 +105,7 @@ export function FitCheckTable({ check, units }: { check: FitCheck; units: Units 
       <table role="table" className={classes['table']} aria-label="Fit check, remedy by remedy">
         <thead role="rowgroup">
           <tr role="row">
-            {HEADS.map((head) => (
+            {(compact ? COMPACT_HEADS : HEADS).map((head) => (
               <th key={head} role="columnheader" scope="col">
                 {head}
               </th>
@@ -110,13 +119,18 @@ export function FitCheckTable({ check, units }: { check: FitCheck; units: Units 
               remedy={remedy}
               units={units}
               isForemost={remedy === foremost}
+              isCompact={compact}
               opened={opened}
               onOpen={setOpened}
             />
           ))}
         </tbody>
       </table>
-      <CheckNotes assumptions={check.assumptions} missing={check.missing} />
+      <CheckNotes
+        assumptions={check.assumptions}
+        missing={check.missing}
+        opener={compact ? 'result' : 'figure'}
+      />
     </div>
   );
 }

@@ -62,24 +62,6 @@ export function TroubleCard<D extends AskDraft>({ draft, onChange, errors }: Tro
         error={errors['mishap']}
         onChange={(mishap) => onChange(withMishap(draft, mishap))}
       />
-      <ChoiceField
-        label="Field of work"
-        hint="Mentors who hold it are asked. It follows from the trouble; change it where you know better."
-        value={draft.discipline ?? ''}
-        field="discipline"
-        error={errors['discipline']}
-        choices={[
-          { value: '', label: 'follows from the trouble' },
-          ...DISCIPLINES.map((one) => ({ value: one as string, label: DISCIPLINE_WORDS[one] })),
-        ]}
-        onChange={(choice) =>
-          onChange({
-            ...draft,
-            discipline: (choice || null) as Discipline | null,
-            isDisciplineChosen: choice !== '',
-          })
-        }
-      />
       <TextField
         label="In one line"
         value={draft.title}
@@ -105,6 +87,26 @@ export function TroubleCard<D extends AskDraft>({ draft, onChange, errors }: Tro
           />
         )}
       </Field>
+      <div className={classes['three']}>
+        <ChoiceField
+          label="Field of work"
+          hint="Mentors who hold it are asked. It follows from the trouble; change it where you know better."
+          value={draft.discipline ?? ''}
+          field="discipline"
+          error={errors['discipline']}
+          choices={[
+            { value: '', label: 'follows from the trouble' },
+            ...DISCIPLINES.map((one) => ({ value: one as string, label: DISCIPLINE_WORDS[one] })),
+          ]}
+          onChange={(choice) =>
+            onChange({
+              ...draft,
+              discipline: (choice || null) as Discipline | null,
+              isDisciplineChosen: choice !== '',
+            })
+          }
+        />
+      </div>
     </div>
   );
 }

@@ -20,6 +20,13 @@ const CHOICES = [
   { value: OTHER, label: 'other, in degrees' },
 ];
 
+/** The same in a word or two, for where the choice itself is put away. */
+export function directionWords(angle: TypedAngle): string {
+  const named = EIGHTHS.find(({ value }) => value === angle);
+  if (named) return named.label;
+  return angle.trim() ? `${angle.trim()}°` : 'side not told';
+}
+
 interface DirectionFieldProps {
   readonly label: string;
   readonly value: TypedAngle;

@@ -7,6 +7,7 @@ import { LayerForm } from './layer-fields';
 import type { LayerPlace } from './near-fields';
 import { NeighbourRows } from './neighbour-fields';
 import { AccessField, FlagFieldset, PatternFieldset, ShopHeadFieldset } from './place-fields';
+import { PutAway } from './put-away';
 import type { HoleCardReading } from './read-hole-card';
 import { readRivet, rivetUnderstood } from './rivet-words';
 import { StackFields } from './stack-fields';
@@ -44,8 +45,34 @@ function limitWords(limits: HoleCardLimits, units: Units): string {
   return `${words.join(', ')} (${limits.source})`;
 }
 
+const PUT_AWAY = [
+  'group.count',
+  'group.oversize',
+  'group.adjacentOversize',
+  'shopHead.width',
+  'shopHead.height',
+];
+
+/** The count alone comes with the hole line: it is no reason to show the rest. */
+function isPatternTold({ oversize, adjacent, headWidth, headHeight }: HoleCardFields): boolean {
+  return [oversize, adjacent, headWidth.typed, headHeight.typed].some((typed) => typed.trim() !== '');
+}
+
 function layerTitle({ name }: LayerFields, index: number): string {
   return name.trim() || `layer ${index + 1}`;
+}
+
+function PatternPart(props: Parameters<typeof PatternFieldset>[0] & { isRivetSet: boolean }): ReactNode {
+  const { value, fault, isRivetSet } = props;
+  return (
+    <PutAway
+      title={isRivetSet ? 'The pattern' : 'The pattern, and a rivet that is already set'}
+      isNeeded={isPatternTold(value) || PUT_AWAY.some((key) => fault(key) !== undefined)}
+    >
+      <PatternFieldset {...props} />
+      {!isRivetSet && <ShopHeadFieldset {...props} />}
+    </PutAway>
+  );
 }
 
 /** What was measured about a hole. Everything may stay blank; what is blank counts as not known. */
@@ -110,13 +137,7 @@ export function HoleCardForm(props: HoleCardFormProps): ReactNode {
       ))}
       <NeighbourRows {...part} />
       <FlagFieldset {...part} />
-      <PatternFieldset {...part} />
-      {!isRivetSet && (
-        <details className={classes['more']}>
-          <summary>A rivet is already set here</summary>
-          <ShopHeadFieldset {...part} />
-        </details>
-      )}
+      <PatternPart {...part} isRivetSet={isRivetSet} />
     </div>
   );
 }

@@ -41,7 +41,7 @@ export function HoleCardChecked({ hole, units }: Pick<DrawnProps, 'hole' | 'unit
   return (
     <>
       {hole.isBehind && <p className={classes['quiet']}>{BEHIND}</p>}
-      <FitCheckTable check={hole.check} units={units} />
+      <FitCheckTable check={hole.check} units={units} compact />
     </>
   );
 }

@@ -4,8 +4,10 @@ import { DirectionField } from './direction-field';
 import type { LayerFields, OffsetFields } from './hole-card-fields';
 import classes from './hole-card.module.css';
 import { LengthField } from './length-field';
-import { BendRows, EdgeRows, NearFoot, type LayerPlace } from './near-fields';
-import { PlacedField } from './placed-field';
+import { BendRows, EdgeLength, EdgeRows, NearFoot, type LayerPlace } from './near-fields';
+import { PLACED_WORDS } from './placed';
+import { PlacedLength, PlacedWay } from './placed-field';
+import { PutAway } from './put-away';
 import { readTyped } from './typed-length';
 
 interface LayerFormProps {
@@ -20,6 +22,8 @@ const OVER = [
   { value: 'centres', label: 'centre to centre' },
   { value: 'pins', label: 'over both pins' },
 ] as const;
+
+const USUAL_SIDE = '90';
 
 function isOblong({ largest, smallest, noHole }: LayerFields): boolean {
   const [one, other] = [readTyped(largest), readTyped(smallest)];
@@ -46,6 +50,7 @@ function HoleFieldsOf({ layer, place, drill, onChange }: LayerFormProps): ReactN
         value={layer.smallest}
         units={units}
         isHole
+        placeholder="round"
         error={fault(`${at}.smallest`)}
         field={fieldName(`${at}.smallest`)}
         onChange={(smallest) => set({ smallest })}
@@ -63,21 +68,33 @@ function HoleFieldsOf({ layer, place, drill, onChange }: LayerFormProps): ReactN
   );
 }
 
-function OffsetFieldsOf({ layer, place, onChange }: LayerFormProps): ReactNode {
+/** Only with pins may the reading be over them. */
+function isReadByPins({ by, away }: OffsetFields): boolean {
+  return by !== 'xy' && away.tool === 'pins' && away.typed.trim() !== '';
+}
+
+function OffsetLength({ layer, place, onChange }: LayerFormProps): ReactNode {
   const { at, units, fault, note, fieldName } = place;
   const key = `${at}.offset`;
+  return (
+    <PlacedLength
+      label="Layers off by"
+      value={layer.offset}
+      units={units}
+      way={PLACED_WORDS[layer.offset.by]}
+      error={fault(key)}
+      note={note(key)}
+      field={fieldName(key)}
+      onChange={(offset) => onChange({ ...layer, offset })}
+    />
+  );
+}
+
+function OffsetWay({ layer, onChange }: LayerFormProps): ReactNode {
   const set = (offset: OffsetFields) => onChange({ ...layer, offset });
   return (
-    <>
-      <PlacedField
-        label="Layers off by"
-        value={layer.offset}
-        units={units}
-        error={fault(key)}
-        note={note(key)}
-        field={fieldName(key)}
-        onChange={set}
-      />
+    <div className={classes['row']}>
+      <PlacedWay label="Layers off by" value={layer.offset} onChange={set} />
       {isReadByPins(layer.offset) && (
         <ChoiceField
           label="Read"
@@ -86,31 +103,42 @@ function OffsetFieldsOf({ layer, place, onChange }: LayerFormProps): ReactNode {
           onChange={(over) => set({ ...layer.offset, over })}
         />
       )}
-    </>
+    </div>
   );
 }
 
-/** Only with pins may the reading be over them. */
-function isReadByPins({ by, away }: OffsetFields): boolean {
-  return by !== 'xy' && away.tool === 'pins' && away.typed.trim() !== '';
+/** Whether anything that is put away differs from what is usual, or is wrong. */
+function isDetailed({ layer, place }: LayerFormProps): boolean {
+  const { edges, bends, noEdge, noBend, noHole, offset } = layer;
+  return (
+    [noEdge, noBend, noHole, offset.by !== 'above', offset.over !== 'centres'].some(Boolean) ||
+    edges.length > 1 ||
+    bends.length > 0 ||
+    edges.some(({ from, angle }) => from !== 'centre' || angle !== USUAL_SIDE) ||
+    place.fault(`${place.at}.edges.0.angle`) !== undefined
+  );
 }
 
-/** What was measured in one layer. */
+/** What was measured in one layer: what nearly every card has in sight, the rest put away. */
 export function LayerForm(props: LayerFormProps): ReactNode {
   const { layer, place, isFirst, onChange } = props;
+  const { edges, bends, noEdge, noBend, noHole } = layer;
   const set = (change: Partial<LayerFields>) => onChange({ ...layer, ...change });
+  const setEdges = (rows: LayerFields['edges']) => set({ edges: rows });
   return (
     <fieldset className={classes['layer']}>
       <legend>{place.name}</legend>
-      {!layer.noHole && (
-        <div className={classes['row']}>
-          <HoleFieldsOf {...props} />
-          {!isFirst && <OffsetFieldsOf {...props} />}
-        </div>
-      )}
-      <EdgeRows place={place} rows={layer.edges} isNone={layer.noEdge} onRows={(edges) => set({ edges })} />
-      <BendRows place={place} rows={layer.bends} isNone={layer.noBend} onRows={(bends) => set({ bends })} />
-      <NearFoot place={place} layer={layer} onChange={set} />
+      <div className={classes['row']}>
+        {!noHole && <HoleFieldsOf {...props} />}
+        {!noHole && !isFirst && <OffsetLength {...props} />}
+        {!noEdge && <EdgeLength place={place} rows={edges} index={0} onRows={setEdges} />}
+      </div>
+      <PutAway title={`More of ${place.name}: which way, rim or centre, bends`} isNeeded={isDetailed(props)}>
+        {!noHole && !isFirst && <OffsetWay {...props} />}
+        <EdgeRows place={place} rows={edges} isNone={noEdge} onRows={setEdges} />
+        <BendRows place={place} rows={bends} isNone={noBend} onRows={(rows) => set({ bends: rows })} />
+        <NearFoot place={place} layer={layer} onChange={set} />
+      </PutAway>
     </fieldset>
   );
 }

@@ -15,6 +15,8 @@ interface LengthFieldProps {
   readonly error?: string | undefined;
   /** What was reckoned from it, where it is not what goes on the card. */
   readonly note?: string | undefined;
+  /** Which way it was measured, where the choice of it is put away. */
+  readonly way?: string | undefined;
   readonly field?: string | undefined;
   readonly placeholder?: string | undefined;
   /** A hole has the drill's name beside it. */
@@ -55,9 +57,9 @@ function news({ typed }: TypedLength, words: string): string {
  * under it; what was typed is never changed. A fault is told when the hand has left the field, not while it is typing.
  */
 export function LengthField(props: LengthFieldProps): ReactNode {
-  const { label, value, onChange, units, error, note, field, isHole = false, withTool = true } = props;
+  const { label, value, onChange, units, error, note, way, field, isHole = false, withTool = true } = props;
   const [isTyping, setTyping] = useState(false);
-  const words = note ?? news(value, understood(value, units, isHole));
+  const words = [way, note ?? news(value, understood(value, units, isHole))].filter(Boolean).join(' · ');
   return (
     <Field label={label} hint={words || undefined} error={isTyping ? undefined : error}>
       {(control) => (

@@ -1,7 +1,7 @@
 import { EDGES_MAX, type Units } from '@rivetside/shared';
 import type { ReactNode } from 'react';
 import { ChoiceField, TickField } from '../../components/field';
-import { DirectionField } from './direction-field';
+import { DirectionField, directionWords } from './direction-field';
 import { blankBend, blankEdge, type BendFields, type EdgeFields, type LayerFields } from './hole-card-fields';
 import classes from './hole-card.module.css';
 import { LengthField } from './length-field';
@@ -22,6 +22,8 @@ interface NearProps<F> {
   readonly isNone: boolean;
   readonly onRows: (rows: readonly F[]) => void;
 }
+
+type EdgeAt = Omit<NearProps<EdgeFields>, 'isNone'> & { readonly index: number };
 
 const FROM = [
   { value: 'centre', label: 'its centre' },
@@ -45,50 +47,63 @@ function RemoveRow({ what, onRemove }: { what: string; onRemove: () => void }): 
   );
 }
 
-export function EdgeRows({ place, rows, isNone, onRows }: NearProps<EdgeFields>): ReactNode {
-  const { at, name, units, fault, note, fieldName } = place;
+/** How far one edge is; where it lies is chosen elsewhere and said here. */
+export function EdgeLength({ place, rows, index, onRows }: EdgeAt): ReactNode {
+  const { at, units, fault, note, fieldName } = place;
+  const key = `${at}.edges.${index}`;
+  const edge = rows[index];
+  if (!edge) return null;
   return (
-    <>
-      {!isNone &&
-        rows.map((edge, index) => {
-          const key = `${at}.edges.${index}`;
-          const label = index === 0 ? `Edge, ${name}` : `Edge ${index + 1}, ${name}`;
-          const set = (change: Partial<EdgeFields>) => onRows(replaced(rows, index, { ...edge, ...change }));
-          return (
-            <div key={index} className={classes['row']}>
-              <LengthField
-                label={label}
-                value={edge.distance}
-                units={units}
-                error={fault(`${key}.distance`) ?? fault(`${key}.minimumD`)}
-                note={note(`${key}.distance`)}
-                field={fieldName(`${key}.distance`)}
-                onChange={(distance) => set({ distance })}
-              />
-              <DirectionField
-                label="It lies"
-                value={edge.angle}
-                error={fault(`${key}.angle`)}
-                field={fieldName(`${key}.angle`)}
-                onChange={(angle) => set({ angle })}
-              />
-              <ChoiceField
-                label="Measured from"
-                value={edge.from}
-                choices={FROM}
-                onChange={(from) => set({ from })}
-              />
-              {index > 0 && (
-                <RemoveRow
-                  what={label.toLowerCase()}
-                  onRemove={() => onRows(rows.filter((_, other) => other !== index))}
-                />
-              )}
-            </div>
-          );
-        })}
-    </>
+    <LengthField
+      label={edgeLabel(place, index)}
+      value={edge.distance}
+      units={units}
+      way={directionWords(edge.angle)}
+      error={fault(`${key}.distance`) ?? fault(`${key}.minimumD`)}
+      note={note(`${key}.distance`)}
+      field={fieldName(`${key}.distance`)}
+      onChange={(distance) => onRows(replaced(rows, index, { ...edge, distance }))}
+    />
   );
+}
+
+function edgeLabel({ name }: LayerPlace, index: number): string {
+  return index === 0 ? `Edge, ${name}` : `Edge ${index + 1}, ${name}`;
+}
+
+/** The sides on which the edges lie; how far the first one is stands with the hole. */
+export function EdgeRows({ place, rows, isNone, onRows }: NearProps<EdgeFields>): ReactNode {
+  const { at, fault, fieldName } = place;
+  if (isNone) return null;
+  return rows.map((edge, index) => {
+    const key = `${at}.edges.${index}`;
+    const label = edgeLabel(place, index);
+    const set = (change: Partial<EdgeFields>) => onRows(replaced(rows, index, { ...edge, ...change }));
+    return (
+      <div key={index} className={classes['row']}>
+        {index > 0 && <EdgeLength place={place} rows={rows} index={index} onRows={onRows} />}
+        <DirectionField
+          label={`${label}: it lies`}
+          value={edge.angle}
+          error={fault(`${key}.angle`)}
+          field={fieldName(`${key}.angle`)}
+          onChange={(angle) => set({ angle })}
+        />
+        <ChoiceField
+          label="Measured from"
+          value={edge.from}
+          choices={FROM}
+          onChange={(from) => set({ from })}
+        />
+        {index > 0 && (
+          <RemoveRow
+            what={label.toLowerCase()}
+            onRemove={() => onRows(rows.filter((_, other) => other !== index))}
+          />
+        )}
+      </div>
+    );
+  });
 }
 
 export function BendRows({ place, rows, isNone, onRows }: NearProps<BendFields>): ReactNode {
