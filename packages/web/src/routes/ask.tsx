@@ -123,7 +123,7 @@ function AskForm({ draftKey, draft, me }: AskFormProps) {
     [set],
   );
   const change = (next: Asking) => set((old) => ({ ...old, ...changedFrom(asked, next) }));
-  const setFields = (holeCard: HoleCardFields) => set((old) => ({ ...old, holeCard }));
+  const setFields = useCallback((holeCard: HoleCardFields) => set((old) => ({ ...old, holeCard })), [set]);
   const setPlace = (place: AskedPlace) =>
     set((old) => ({ ...old, place, holeCard: cardAt(place, where, old, units) }));
 
@@ -193,7 +193,7 @@ function AskForm({ draftKey, draft, me }: AskFormProps) {
                   isRivetSet={asked.mishap === 'badRivet'}
                 />
               ),
-              drawing: <HoleCardDrawn hole={hole} fields={fields} units={units} onChange={setFields} />,
+              drawing: <HoleCardDrawn hole={hole} units={units} onChange={setFields} />,
               check: <HoleCardChecked hole={hole} units={units} />,
             }
           : null

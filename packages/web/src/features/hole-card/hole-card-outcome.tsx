@@ -1,5 +1,5 @@
 import type { Units } from '@rivetside/shared';
-import type { ReactNode } from 'react';
+import { memo } from 'react';
 import { FitCheckTable } from '../../components/fit-check-table';
 import { HoleDrawing } from '../../components/hole-drawing';
 import type { HoleCardFields } from './hole-card-fields';
@@ -9,16 +9,16 @@ import type { HoleCardAtHand } from './use-hole-card';
 
 interface DrawnProps {
   readonly hole: HoleCardAtHand;
-  readonly fields: HoleCardFields;
   readonly units: Units;
+  /** Has to stay the same function, else every keystroke draws it all again. */
   readonly onChange: (fields: HoleCardFields) => void;
 }
 
 const BEHIND = 'As last understood: a field of the hole card is not.';
 
 /** The card drawn beside its form; a point that is moved on it writes its field. */
-export function HoleCardDrawn({ hole, fields, units, onChange }: DrawnProps): ReactNode {
-  const { card, check, reading, isBehind } = hole;
+export const HoleCardDrawn = memo(function HoleCardDrawn({ hole, units, onChange }: DrawnProps) {
+  const { fields, card, check, reading, isBehind } = hole;
   if (!card) return <p className={classes['quiet']}>Drawn as soon as the rivet is given.</p>;
   return (
     <>
@@ -33,10 +33,13 @@ export function HoleCardDrawn({ hole, fields, units, onChange }: DrawnProps): Re
       />
     </>
   );
-}
+});
 
 /** Every remedy checked beside the form. */
-export function HoleCardChecked({ hole, units }: Pick<DrawnProps, 'hole' | 'units'>): ReactNode {
+export const HoleCardChecked = memo(function HoleCardChecked({
+  hole,
+  units,
+}: Pick<DrawnProps, 'hole' | 'units'>) {
   if (!hole.check) return <p className={classes['quiet']}>Checked as soon as the rivet is given.</p>;
   return (
     <>
@@ -44,4 +47,4 @@ export function HoleCardChecked({ hole, units }: Pick<DrawnProps, 'hole' | 'unit
       <FitCheckTable check={hole.check} units={units} compact />
     </>
   );
-}
+});

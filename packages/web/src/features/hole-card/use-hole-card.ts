@@ -4,6 +4,8 @@ import type { HoleCardFields } from './hole-card-fields';
 import { readHoleCard, type HoleCardReading } from './read-hole-card';
 
 export interface HoleCardAtHand {
+  /** What the rest here is of. */
+  readonly fields: HoleCardFields;
   /** Of what was typed a moment ago: it gives way to the typing hand. */
   readonly reading: HoleCardReading;
   /** The card as last understood, so that drawing and check stand while a number is half typed. */
@@ -21,5 +23,8 @@ export function useHoleCard(fields: HoleCardFields, units: Units): HoleCardAtHan
   const card = reading.card ?? (reading.isBlank ? null : last);
   if (card !== last) setLast(card);
   const check = useMemo(() => card && fitCheck(card), [card]);
-  return { reading, card, check, isBehind: card !== null && reading.card === null };
+  return useMemo(
+    () => ({ fields: settled, reading, card, check, isBehind: card !== null && reading.card === null }),
+    [settled, reading, card, check],
+  );
 }
