@@ -10,10 +10,11 @@ import type { QueryClient } from '@tanstack/react-query';
 import { useQuery } from '@tanstack/react-query';
 import { useNavigate } from 'react-router-dom';
 import { ErrorPage } from '../components/pages/error-page';
+import { PlanKey } from '../components/plan-key';
 import { PlanView } from '../components/plan-view';
 import { CardSkeleton } from '../components/skeletons';
 import { AllDriven, BenchPage, onePerKit, TwoColumns } from '../features/bench/bench-parts';
-import { BuildSwitch, useChosenBuild } from '../features/bench/build-switch';
+import { aircraftWords, BuildSwitch, useChosenBuild } from '../features/bench/build-switch';
 import { MentorsCard } from '../features/bench/chapter-card';
 import { NoBuildYet, NoChapterYet } from '../features/bench/first-things';
 import { KitNoticesCard } from '../features/bench/kit-notices-card';
@@ -59,7 +60,7 @@ export function Component() {
   );
 }
 
-/** One part for each thing that somebody is in their chapters. */
+/** One part for each thing that somebody is in their chapters; those who wait for them come first. */
 function Parts({ me }: { readonly me: Me }) {
   const isBuilder = me.memberships.some(({ chapterId }) => isBuilderIn(me, chapterId));
   const runs = me.memberships.filter(
@@ -67,8 +68,8 @@ function Parts({ me }: { readonly me: Me }) {
   );
   return (
     <>
-      <BuilderPart me={me} isBuilder={isBuilder} />
       {hasDesk(me) && <MostNeededCard show={(rows, label) => <QuestionLines rows={rows} label={label} />} />}
+      <BuilderPart me={me} isBuilder={isBuilder} />
       {runs.map(({ chapterId, chapterName }) => (
         <ChapterPart key={chapterId} chapterId={chapterId} chapterName={chapterName} />
       ))}
@@ -136,6 +137,7 @@ function BuildPart({ build, sections }: BuildPartProps) {
 }
 
 function InHand({ build, sections, inHand }: BuildPartProps & { readonly inHand: SectionSummary }) {
+  const me = useActor();
   const { data: section, error, refetch } = useQuery(sectionById(inHand.id));
   const questions = useQuery(firstQuestions(MINE, LINES_SHOWN)).data?.items ?? [];
   const openItems = useQuery(buildOpenItems(build.id)).data?.items ?? [];
@@ -143,6 +145,7 @@ function InHand({ build, sections, inHand }: BuildPartProps & { readonly inHand:
   if (!section) return <CardSkeleton />;
   return (
     <OnTheBench
+      aircraft={aircraftWords(build, me.id)}
       plan={<KitPlan sections={sections} section={section} />}
       section={section}
       sections={sections}
@@ -165,11 +168,14 @@ function KitPlan({
     if (there) void navigate(`/sections/${there.id}`);
   };
   return (
-    <PlanView
-      name="The kit, with what is on the bench"
-      regions={regionsOnPlan(sections, section)}
-      onChoose={handleChoose}
-    />
+    <>
+      <PlanView
+        name="The kit, with what is on the bench"
+        regions={regionsOnPlan(sections, section)}
+        onChoose={handleChoose}
+      />
+      <PlanKey shows={['waits', 'held']} />
+    </>
   );
 }
 

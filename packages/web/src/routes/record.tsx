@@ -38,8 +38,8 @@ function OwnRecord({ builds }: { readonly builds: readonly Build[] }) {
       </h1>
       <BuildSwitch builds={builds} chosen={build} />
       <RecordPage key={build.id}>
-        <EntriesCard build={build} />
         <OpenItemsCard build={build} />
+        <EntriesCard build={build} />
       </RecordPage>
     </>
   );

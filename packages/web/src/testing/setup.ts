@@ -1,10 +1,13 @@
 import '@testing-library/jest-dom';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { session } from '../lib/session';
 import { keptOnDevice } from './kept-on-device';
 import { server } from './server';
 
 jest.mock('idb-keyval', () => jest.requireActual('./kept-on-device'));
+
+// The first page of a file is compiled while it is waited for, and a slow machine is no failure.
+configure({ asyncUtilTimeout: 10_000 });
 
 beforeAll(() => server.listen({ onUnhandledRequest: 'error' }));
 afterEach(() => {

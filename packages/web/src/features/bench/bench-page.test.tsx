@@ -253,7 +253,7 @@ describe('the bench of others', () => {
     expect(await listed('No fix yet in Fenmoor')).toHaveTextContent('Hole 7 in the doubler');
     expect(queries.at(-1)).toMatch(/state=open/);
     const term = await screen.findByText('riveting');
-    expect(term.nextElementSibling).toHaveTextContent('Imke Vosterlund (M-07)');
+    expect(term.nextElementSibling).toHaveTextContent('Imke Vosterlund (M‑07)');
     expect(screen.getByText('controls').nextElementSibling).toHaveTextContent('nobody yet');
     expect(screen.getByText('1 builder, 1 mentor')).toBeInTheDocument();
   });

@@ -12,6 +12,12 @@ export function useChosenBuild(builds: readonly Build[]): Build {
   return asked ?? builds.find(({ owner }) => owner.id === me.id) ?? builds[0]!;
 }
 
+/** "Fellwisp Two, kit serial 141", and whose it is where it is not the reader's. */
+export function aircraftWords({ kitName, serial, owner }: Build, meId: string): string {
+  const words = `${kitName}, kit serial ${serial}`;
+  return owner.id === meId ? words : `${words}, ${owner.name}`;
+}
+
 interface BuildSwitchProps {
   readonly builds: readonly Build[];
   readonly chosen: Build;

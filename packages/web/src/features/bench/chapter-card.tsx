@@ -44,7 +44,9 @@ function mentorsIn(
 ): string[] {
   return members
     .filter(({ roles, disciplines }) => roles.includes('mentor') && disciplines.includes(discipline))
-    .map(({ name, stampNumber }) => (stampNumber ? `${name} (${stampNumber})` : name));
+    .map(({ name, stampNumber }) =>
+      stampNumber ? `${name}\u00a0(${stampNumber.replace('-', '\u2011')})` : name,
+    );
 }
 
 function memberWords(members: readonly ChapterMember[]): string {

@@ -8,6 +8,8 @@ import classes from './bench.module.css';
 interface OnTheBenchProps {
   /** The kit as drawn, with this section chosen. */
   readonly plan: ReactNode;
+  /** Which aircraft, in words. */
+  readonly aircraft: string;
   readonly section: Section;
   readonly sections: readonly SectionSummary[];
   readonly questions: readonly QuestionRow[];
@@ -16,13 +18,13 @@ interface OnTheBenchProps {
 
 /** The section in hand, step by step. */
 export function OnTheBench(props: OnTheBenchProps): ReactNode {
-  const { plan, section, sections, questions, openItems } = props;
+  const { plan, aircraft, section, sections, questions, openItems } = props;
   const also = alsoBegun(sections, section);
   return (
     <section className={classes['hero']} aria-labelledby="on-the-bench">
       <div className={classes['plan']}>{plan}</div>
       <div>
-        <p className={classes['over']}>On the bench now</p>
+        <p className={classes['over']}>On the bench now · {aircraft}</p>
         <h2 id="on-the-bench">
           <Link to={`/sections/${section.id}`}>{section.name}</Link>
           {section.critical && <small>critical</small>}
@@ -69,7 +71,7 @@ function StepRow({ line }: { readonly line: StepLine }): ReactNode {
       <span className={classes['waits']}>
         {waitsOn ? (
           <Link to={`/questions/${waitsOn.id}`}>waits on {waitsOn.number}</Link>
-        ) : openItems > 0 && state !== 'driven' ? (
+        ) : openItems > 0 ? (
           `${openItems} open ${openItems === 1 ? 'item' : 'items'}`
         ) : (
           <span aria-hidden="true">{STATE_WORDS[state]}</span>

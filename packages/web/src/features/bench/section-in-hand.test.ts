@@ -109,4 +109,18 @@ describe('its steps', () => {
     ];
     expect(lines([], items).map(({ openItems }) => openItems)).toEqual([0, 0, 1]);
   });
+
+  it('count them once where two steps close something, on the next of the two', () => {
+    const both = [step(1, { closesStructure: true }), step(2, { closesStructure: true })];
+    const items = [{ sectionId: 'STB', clearedAt: null }] as never;
+    const counted = (progress: StepState[]) =>
+      stepLines({ id: 'STB', steps: both, progress, holeLines: [] }, [], items).map(
+        ({ openItems }) => openItems,
+      );
+    expect(counted(['pinned', 'todo'])).toEqual([1, 0]);
+    expect(counted(['driven', 'todo'])).toEqual([0, 1]);
+    expect(progressWords({ steps: both, progress: ['driven', 'todo'] })).toMatch(
+      /closes with steps 1 and 2$/,
+    );
+  });
 });

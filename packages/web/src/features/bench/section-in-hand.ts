@@ -26,16 +26,17 @@ export function alsoBegun(sections: readonly SectionSummary[], inHand: SectionSu
 export function progressWords({ progress, steps }: Pick<Section, 'progress' | 'steps'>): string {
   const count = (state: StepState) => progress.filter((one) => one === state).length;
   const pinned = count('pinned');
-  const closing = steps.find(({ closesStructure }) => closesStructure);
+  const closing = steps.filter(({ closesStructure }) => closesStructure).map(({ number }) => number);
   const words = `${count('driven')} of ${steps.length} steps driven${pinned > 0 ? `, ${pinned} pinned` : ''}`;
-  return closing ? `${words} · closes with step ${closing.number}` : words;
+  if (closing.length === 0) return words;
+  return `${words} · closes with ${closing.length === 1 ? 'step' : 'steps'} ${closing.join(' and ')}`;
 }
 
 export interface StepLine {
   readonly step: Step;
   readonly state: StepState;
   readonly waitsOn: QuestionRow | null;
-  /** On the step that closes the section: what must be cleared before it. */
+  /** On the next step that closes anything: what must be cleared before it. */
   readonly openItems: number;
 }
 
@@ -49,14 +50,16 @@ export function stepLines(
 ): StepLine[] {
   const open = openItems.filter(({ clearedAt, sectionId }) => clearedAt === null && sectionId === section.id);
   const waiting = questions.filter((one) => one.section?.id === section.id && HOLDS.includes(one.state));
+  const stateAt = (at: number) => section.progress[at] ?? 'todo';
+  const next = section.steps.find((step, at) => step.closesStructure && stateAt(at) !== 'driven');
   return section.steps.map((step, at) => {
     const codes = section.holeLines.filter(({ stepId }) => stepId === step.id).map(({ code }) => code);
     return {
       step,
-      state: section.progress[at] ?? 'todo',
+      state: stateAt(at),
       waitsOn:
         waiting.find(({ holeLineCode }) => holeLineCode !== null && codes.includes(holeLineCode)) ?? null,
-      openItems: step.closesStructure ? open.length : 0,
+      openItems: step.id === next?.id ? open.length : 0,
     };
   });
 }

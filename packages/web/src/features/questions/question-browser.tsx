@@ -8,19 +8,17 @@ import { narrowings } from './filter-of-address';
 import { questionPages } from './queries';
 import { QuestionFilters, type QuestionFiltersProps } from './question-filters';
 import { QuestionList } from './question-list';
-import { QuestionRacks } from './question-racks';
 import classes from './questions.module.css';
 
 interface QuestionBrowserProps extends QuestionFiltersProps {
   readonly mayAsk: boolean;
 }
 
-/** The racks, what narrows them, and the list with more of it on request. */
+/** What narrows the list, and the list with more of it on request. */
 export function QuestionBrowser(props: QuestionBrowserProps): ReactNode {
   const { filter, mayAsk } = props;
   return (
     <>
-      <QuestionRacks filter={filter} />
       <QuestionFilters {...props} />
       <FoundQuestions filter={filter} mayAsk={mayAsk} />
     </>

@@ -3,6 +3,7 @@ import { type ReactNode, useId, useState } from 'react';
 import { ChoiceField, type Choice, TickField } from '../../components/field';
 import { narrowings } from './filter-of-address';
 import type { QuestionFilter } from './queries';
+import { QuestionRacks } from './question-racks';
 import { WordsField } from './words-field';
 import classes from './questions.module.css';
 
@@ -32,22 +33,27 @@ export function QuestionFilters(props: QuestionFiltersProps): ReactNode {
   const count = narrowings(filter);
   return (
     <div className={classes['filters']}>
-      <button
-        type="button"
-        className={`btn plain ${classes['unfold']}`}
-        aria-expanded={isOpen}
-        aria-controls={id}
-        onClick={() => setOpen(!isOpen)}
-      >
-        {count > 0 ? `Narrow down, ${count} set` : 'Narrow down'}
-      </button>
-      <div id={id} className={classes['fields']} data-open={isOpen || undefined}>
-        <FilterFields {...props} />
-        <TickField
-          label="Only mine"
-          isOn={filter.mine === 'true'}
-          onChange={(isOn) => onChange({ ...filter, mine: isOn ? 'true' : undefined })}
-        />
+      <div className={classes['unfold']}>
+        <button
+          type="button"
+          className="btn plain"
+          aria-expanded={isOpen}
+          aria-controls={id}
+          onClick={() => setOpen(!isOpen)}
+        >
+          {count > 0 ? `Narrow down, ${count} set` : 'Narrow down'}
+        </button>
+      </div>
+      <div id={id} className={classes['folded']} data-open={isOpen || undefined}>
+        <QuestionRacks filter={filter} />
+        <div className={classes['fields']}>
+          <FilterFields {...props} />
+          <TickField
+            label="Only mine"
+            isOn={filter.mine === 'true'}
+            onChange={(isOn) => onChange({ ...filter, mine: isOn ? 'true' : undefined })}
+          />
+        </div>
       </div>
     </div>
   );

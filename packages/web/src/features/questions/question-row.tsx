@@ -1,10 +1,11 @@
-import type { QuestionRow as Row } from '@rivetside/shared';
+import { isMember, type QuestionRow as Row } from '@rivetside/shared';
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { CallOut } from '../../components/call-out';
 import { PlanLocator } from '../../components/plan-locator';
 import { StateWord } from '../../components/state-word';
 import { Verdict } from '../../components/verdict';
+import { useActor } from '../../lib/session';
 import { useTimes } from '../../lib/times';
 import { waitWords } from './wait-words';
 import classes from './questions.module.css';
@@ -38,6 +39,7 @@ export function QuestionRow({ row }: { readonly row: Row }): ReactNode {
 }
 
 function Place({ row }: { readonly row: Row }): ReactNode {
+  const me = useActor();
   const { section, partNumber, holeLineCode } = row;
   return (
     <>
@@ -51,7 +53,7 @@ function Place({ row }: { readonly row: Row }): ReactNode {
         </span>
       ))}
       {` · ${row.askedBy.name}`}
-      {row.audience === 'kit' && ` · ${row.chapterName}, shared with the kit`}
+      {!isMember(me, row.chapterId) && ` · ${row.chapterName}`}
     </>
   );
 }

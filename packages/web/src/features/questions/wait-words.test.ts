@@ -4,7 +4,7 @@ import { waitWords } from './wait-words';
 
 const SINCE = '2025-05-12T23:30:00.000Z';
 const said = (state: QuestionRow['state'], waits: QuestionRow['waits']['for'], zone = 'UTC') =>
-  waitWords({ state, waits: { for: waits, since: SINCE } }, timesIn(zone));
+  waitWords({ state, waits: { for: waits, since: SINCE } }, timesIn(zone)).replaceAll('\u00a0', ' ');
 
 it.each([
   ['open', 'firstFix', 'no fix yet, since 12 May 25'],
@@ -18,6 +18,13 @@ it.each([
 ] as const)('says of one that is %s and waits for %s: %s', (state, waits, words) =>
   expect(said(state, waits)).toBe(words),
 );
+
+it('breaks no line within a day', () => {
+  const waits = { for: 'stamp', since: SINCE } as const;
+  expect(waitWords({ state: 'advised', waits }, timesIn('UTC')).split(' ').at(-1)).toBe(
+    'since\u00a012\u00a0May\u00a025',
+  );
+});
 
 it('gives the day where the reader is', () => {
   expect(said('open', 'firstFix', 'Europe/London')).toBe('no fix yet, since 13 May 25');

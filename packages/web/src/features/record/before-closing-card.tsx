@@ -32,7 +32,7 @@ export function BeforeClosingCard({ build, section }: BeforeClosingCardProps): R
       ) : (
         <>
           {here.length === 0 && <p className={classes['quiet']}>Nothing is open in {section.name}.</p>}
-          <OpenItems items={here} label={`Open in ${section.name}`} mayClear={build.mine} />
+          <OpenItems items={here} label={`Open in ${section.name}`} mayClear={build.mine} isOfOneSection />
         </>
       )}
     </PageCard>

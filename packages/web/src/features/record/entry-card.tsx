@@ -3,6 +3,7 @@ import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { CallOut } from '../../components/call-out';
 import { useTimes } from '../../lib/times';
+import { lineWords } from './line-words';
 import { minutesInWords } from './minutes-in-words';
 import classes from './record.module.css';
 
@@ -15,12 +16,12 @@ const KIND_WORDS: Readonly<Record<Entry['kind'], string>> = {
 
 /** A dated entry as it was written when it was done. */
 export function EntryCard({ entry }: { readonly entry: Entry }): ReactNode {
-  const { dateTime } = useTimes();
+  const times = useTimes();
   const { kind, sectionName, title, lines, questionId, questionNumber, doneAt } = entry;
   return (
     <li className={classes['entry']}>
       <p className={classes['when']}>
-        <time dateTime={doneAt}>{dateTime(doneAt)}</time>
+        <time dateTime={doneAt}>{times.dateTime(doneAt)}</time>
         <span>{[KIND_WORDS[kind], sectionName].filter(Boolean).join(' · ')}</span>
       </p>
       <div>
@@ -30,7 +31,7 @@ export function EntryCard({ entry }: { readonly entry: Entry }): ReactNode {
             {lines.map(({ label, text }, at) => (
               <div key={at}>
                 <dt>{label}</dt>
-                <dd>{text}</dd>
+                <dd>{lineWords(text, times)}</dd>
               </div>
             ))}
           </dl>

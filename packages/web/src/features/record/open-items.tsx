@@ -11,10 +11,12 @@ interface OpenItemsProps {
   readonly label: string;
   /** Owner and crew clear; others read. */
   readonly mayClear: boolean;
+  /** All are of one section, which is named already. */
+  readonly isOfOneSection?: boolean;
 }
 
 /** What must be cleared before a section is closed. */
-export function OpenItems({ items, label, mayClear }: OpenItemsProps): ReactNode {
+export function OpenItems({ items, label, mayClear, isOfOneSection = false }: OpenItemsProps): ReactNode {
   const [clearing, setClearing] = useState<OpenItem | null>(null);
   const [cleared, setCleared] = useState('');
   const list = useRef<HTMLDivElement>(null);
@@ -32,7 +34,7 @@ export function OpenItems({ items, label, mayClear }: OpenItemsProps): ReactNode
       <ul className={classes['list']} aria-label={label}>
         {items.map((item) => (
           <li key={item.id} className={classes['item']}>
-            <ItemWords item={item} />
+            <ItemWords item={item} section={isOfOneSection ? null : item.sectionName} />
             {mayClear && (
               <button
                 type="button"
@@ -55,14 +57,19 @@ export function OpenItems({ items, label, mayClear }: OpenItemsProps): ReactNode
   );
 }
 
-function ItemWords({ item }: { readonly item: OpenItem }): ReactNode {
+interface ItemWordsProps {
+  readonly item: OpenItem;
+  readonly section: string | null;
+}
+
+function ItemWords({ item, section }: ItemWordsProps): ReactNode {
   const { date } = useTimes();
-  const { text, sectionName, due, raisedAt, questionId } = item;
+  const { text, due, raisedAt, questionId } = item;
   return (
     <div>
       <b>{text}</b>
       <small>
-        {[sectionName, due && `due ${due}`, `raised ${date(raisedAt)}`].filter(Boolean).join(' · ')}
+        {[section, due && `due ${due}`, `raised ${date(raisedAt)}`].filter(Boolean).join(' · ')}
         {questionId && (
           <>
             {' · '}

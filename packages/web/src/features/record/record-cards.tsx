@@ -98,7 +98,7 @@ function ItemsOfBuild({ items, mayClear }: ItemsOfBuildProps): ReactNode {
   );
 }
 
-/** Entries beside what is still open. */
+/** What is still open comes first where there is one column, and stands at the right where there are two. */
 export function RecordPage({ children }: { readonly children: ReactNode }): ReactNode {
   return <div className={classes['page']}>{children}</div>;
 }
