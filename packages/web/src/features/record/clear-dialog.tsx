@@ -23,17 +23,19 @@ interface ClearDialogProps {
 /** An item is cleared by saying what was done; the words stay on the device until they are sent. */
 export function ClearDialog({ item, onClose, onCleared }: ClearDialogProps): ReactNode {
   return (
-    <Modal
-      opened
-      onClose={onClose}
-      centered
-      title="Clear an open item"
-      closeButtonProps={{ 'aria-label': 'Close without clearing', size: 44 }}
-      transitionProps={{ duration: 0 }}
-      className={classes['dialog'] ?? ''}
-    >
-      <ClearForm item={item} onClose={onClose} onCleared={onCleared} />
-    </Modal>
+    <Modal.Root opened onClose={onClose} centered transitionProps={{ duration: 0 }} returnFocus={false}>
+      <Modal.Overlay />
+      <Modal.Content className={classes['dialog']}>
+        {/* Mantine's own header would be a second banner of the page to whoever listens to it. */}
+        <div className={classes['dialogHead']}>
+          <Modal.Title>Clear an open item</Modal.Title>
+          <Modal.CloseButton size={44} aria-label="Close without clearing" />
+        </div>
+        <Modal.Body>
+          <ClearForm item={item} onClose={onClose} onCleared={onCleared} />
+        </Modal.Body>
+      </Modal.Content>
+    </Modal.Root>
   );
 }
 

@@ -1,5 +1,5 @@
 import type { OpenItem } from '@rivetside/shared';
-import { lazy, type ReactNode, Suspense, useRef, useState } from 'react';
+import { lazy, type ReactNode, Suspense, useEffect, useRef, useState } from 'react';
 import { Link } from 'react-router-dom';
 import { useTimes } from '../../lib/times';
 import classes from './record.module.css';
@@ -20,11 +20,15 @@ export function OpenItems({ items, label, mayClear, isOfOneSection = false }: Op
   const [clearing, setClearing] = useState<OpenItem | null>(null);
   const [cleared, setCleared] = useState('');
   const list = useRef<HTMLDivElement>(null);
+  const focusNext = useRef<HTMLElement | null>(null);
+  // The dialog lets go of the focus when it is gone, and it would fall to the top of the page.
+  useEffect(() => {
+    if (clearing === null) focusNext.current?.focus();
+  }, [clearing]);
   const handleCleared = (item: OpenItem) => {
+    focusNext.current = list.current;
     setClearing(null);
     setCleared(`Cleared: ${item.text}`);
-    // Its button is gone: the focus would fall to the top of the page.
-    list.current?.focus();
   };
   return (
     <div ref={list} tabIndex={-1} className={classes['openItems']}>
@@ -40,7 +44,10 @@ export function OpenItems({ items, label, mayClear, isOfOneSection = false }: Op
                 type="button"
                 className="btn plain"
                 aria-label={`Clear: ${item.text}`}
-                onClick={() => setClearing(item)}
+                onClick={({ currentTarget }) => {
+                  focusNext.current = currentTarget;
+                  setClearing(item);
+                }}
               >
                 Clear
               </button>

@@ -138,6 +138,7 @@ describe('an open item', () => {
     expect(screen.getByLabelText('What was done')).toHaveValue('Rib came');
     await user.click(screen.getByRole('button', { name: 'Not yet' }));
     await waitFor(() => expect(screen.queryByLabelText('What was done')).not.toBeInTheDocument());
+    expect(screen.getByRole('button', { name: /^Clear:/ })).toHaveFocus();
     await open();
     await waitFor(() => expect(screen.getByLabelText('What was done')).toHaveValue('Rib came'));
   });
