@@ -64,7 +64,9 @@ export class StampStory {
     const reviews = [...this.now().reviews, { at, by, decision, reason }];
     const rows = reviews.map(({ by: { id: byId }, ...look }) => ({ ...look, byId }));
     await this.write({ reviews: rows, heldAt: null, heldReason: null, heldByNoticeId: null });
-    return this.show({ ...this.now(), state: 'live', held: null, reviews });
+    this.show({ ...this.now(), state: 'live', held: null, reviews });
+    // As the app has it: what is not kept is gone, for a stamp is never edited.
+    return decision === 'keep' ? this.now() : this.withdraw(reason);
   }
 
   async withdraw(reason: string): Promise<Endorsement> {
