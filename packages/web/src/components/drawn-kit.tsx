@@ -1,4 +1,4 @@
-import { type KeyboardEvent, type ReactNode, useId } from 'react';
+import { type ReactNode, type SVGProps, useId } from 'react';
 import classes from './plan.module.css';
 
 export type RegionFill = 'none' | 'chosen' | 'waits' | 'held' | 'todo' | 'pinned' | 'driven';
@@ -7,6 +7,8 @@ export interface PlanRegion {
   readonly fill: RegionFill;
   /** Questions that wait there. */
   readonly count?: number;
+  /** Chosen, where the fill has something else to tell: outlined. */
+  readonly isChosen?: boolean;
 }
 export interface DrawnKitProps {
   /** What the drawing as a whole is for. */
@@ -22,7 +24,7 @@ const FILL_WORDS: Readonly<Record<RegionFill, string>> = {
   waits: 'a question waits',
   held: 'held or under review',
   todo: 'to do',
-  pinned: 'begun',
+  pinned: 'pinned',
   driven: 'driven',
 };
 
@@ -30,6 +32,19 @@ const FILL_WORDS: Readonly<Record<RegionFill, string>> = {
 function wordsOf({ label, fill, count = 0 }: PlanRegion): string {
   const waiting = count > 0 ? `${count} ${count === 1 ? 'question' : 'questions'} open` : '';
   return [label, FILL_WORDS[fill], waiting].filter(Boolean).join(', ');
+}
+
+/** One stop of the keyboard for a left and a right side, or several shapes, that mean the same. */
+function firstShapes(
+  shapes: Readonly<Record<string, string>>,
+  regions: DrawnKitProps['regions'],
+): Set<string> {
+  const byLabel = new Map<string, string>();
+  for (const region of Object.keys(shapes)) {
+    const label = regions[region]?.label;
+    if (label !== undefined && !byLabel.has(label)) byLabel.set(label, region);
+  }
+  return new Set(byLabel.values());
 }
 
 interface DrawingProps extends DrawnKitProps {
@@ -49,46 +64,57 @@ export function DrawnKit({
   children,
 }: DrawingProps): ReactNode {
   const id = useId();
-  const names = Object.keys(shapes).filter((region) => regions[region]);
+  const first = firstShapes(shapes, regions);
   return (
     <svg className={classes['plan']} viewBox={box} role={onChoose ? 'group' : 'img'} aria-label={name}>
       <Hatches id={id} />
       {Object.entries(shapes).map(([region, shape]) => {
         const drawn = regions[region];
         const fill = region === chosen ? 'chosen' : (drawn?.fill ?? 'none');
-        const look = { d: shape, className: classes['region'], 'data-fill': fill, style: hatchOf(id, fill) };
-        if (!drawn || !onChoose) return <path key={region} {...look} />;
-        // One stop of the keyboard for a left and a right side that mean the same.
-        const isSecond = names.some(
-          (other) =>
-            other !== region &&
-            regions[other]!.label === drawn.label &&
-            names.indexOf(other) < names.indexOf(region),
-        );
-        const press = (event: KeyboardEvent) => {
-          if (event.key !== 'Enter' && event.key !== ' ') return;
-          event.preventDefault();
-          onChoose(region);
+        const isChosen = fill === 'chosen' || drawn?.isChosen === true;
+        const look = {
+          d: shape,
+          className: classes['region'],
+          'data-fill': fill,
+          'data-chosen': isChosen || undefined,
+          style: hatchOf(id, fill),
         };
+        if (!drawn || !onChoose) return <path key={region} {...look} />;
+        const words = wordsOf({ ...drawn, fill });
+        const choose = () => onChoose(region);
+        const pressed = { words, isChosen, isFirst: first.has(region), onChoose: choose };
         return (
-          <path
-            key={region}
-            {...look}
-            role="button"
-            tabIndex={isSecond ? -1 : 0}
-            aria-hidden={isSecond || undefined}
-            aria-pressed={fill === 'chosen'}
-            aria-label={wordsOf({ ...drawn, fill })}
-            onClick={() => onChoose(region)}
-            onKeyDown={press}
-          >
-            <title>{wordsOf({ ...drawn, fill })}</title>
+          <path key={region} {...look} {...buttonOf(pressed)}>
+            <title>{words}</title>
           </path>
         );
       })}
       {children}
     </svg>
   );
+}
+
+interface Pressed {
+  readonly words: string;
+  readonly isChosen: boolean;
+  readonly isFirst: boolean;
+  readonly onChoose: () => void;
+}
+
+function buttonOf({ words, isChosen, isFirst, onChoose }: Pressed): SVGProps<SVGPathElement> {
+  return {
+    role: 'button',
+    tabIndex: isFirst ? 0 : -1,
+    'aria-hidden': isFirst ? undefined : true,
+    'aria-pressed': isChosen,
+    'aria-label': words,
+    onClick: onChoose,
+    onKeyDown: (event) => {
+      if (event.key !== 'Enter' && event.key !== ' ') return;
+      event.preventDefault();
+      onChoose();
+    },
+  };
 }
 
 function hatchOf(id: string, fill: RegionFill): { fill: string } | undefined {

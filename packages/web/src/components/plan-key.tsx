@@ -7,7 +7,7 @@ const WORDS: Readonly<Record<Shown, string>> = {
   held: 'held or under review',
   chosen: 'chosen',
   driven: 'driven',
-  pinned: 'begun',
+  pinned: 'pinned',
   todo: 'to do',
 };
 

@@ -81,8 +81,11 @@ export const PLAN_DETAILS = {
 export const SIDE_BOX = '30 20 600 190';
 export const SIDE_SHAPES: Readonly<Record<string, string>> = {
   cowl: 'M60 116C62 96 84 88 132 86L132 150C88 150 62 138 60 116Z',
-  fwd: 'M132 86L208 84L208 156L132 150Z',
-  cabin: 'M208 84L312 92L312 154L208 156Z',
+  // The canopy is one with the firewall in the kit's sections, the gear with the centre fuselage.
+  fwd: 'M132 86L208 84L208 156L132 150Z M186 85Q222 44 280 56Q306 64 312 92L208 84Z',
+  cabin:
+    'M208 84L312 92L312 154L208 156Z M174 153H179L166 186H161Z M230 156H237L241 186H235Z ' +
+    'M148 192a14 14 0 1 0 28 0a14 14 0 1 0-28 0Z M225 192a14 14 0 1 0 28 0a14 14 0 1 0-28 0Z',
   tailcone: 'M312 92L546 104L546 124L312 154Z',
   'L-tank': 'M196 150L236 148L236 160L198 160Z',
   'L-inner': 'M236 148L286 150L286 160L236 160Z',
@@ -93,5 +96,4 @@ export const SIDE_SHAPES: Readonly<Record<string, string>> = {
 };
 export const SIDE_DETAILS = {
   canopy: 'M186 85Q222 44 280 56Q306 64 312 92L208 84Z',
-  gear: 'M176 152L164 186M232 156L238 186',
 } as const;

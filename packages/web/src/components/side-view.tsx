@@ -8,10 +8,8 @@ export function SideView(props: DrawnKitProps): ReactNode {
   return (
     <DrawnKit {...props} shapes={SIDE_SHAPES} box={SIDE_BOX}>
       <g aria-hidden="true">
-        <path d={SIDE_DETAILS.canopy} className={classes['glass']} />
-        <path d={SIDE_DETAILS.gear} className={classes['hair']} strokeWidth="3" />
-        <circle cx="162" cy="192" r="14" className={classes['hair']} />
-        <circle cx="239" cy="192" r="14" className={classes['hair']} />
+        <path d={SIDE_DETAILS.canopy} className={classes['glazed']} />
+        <path d="M246 51V86" className={classes['hair']} />
         <path d="M57 76V158" className={classes['hair']} />
       </g>
     </DrawnKit>

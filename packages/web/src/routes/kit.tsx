@@ -1,12 +1,20 @@
-import { canAskIn, type SectionSummary } from '@rivetside/shared';
+import { canAskIn, type Kit, type SectionSummary } from '@rivetside/shared';
 import type { QueryClient } from '@tanstack/react-query';
 import { useQuery } from '@tanstack/react-query';
-import { type LoaderFunctionArgs, Link, useNavigate, useParams, useSearchParams } from 'react-router-dom';
+import {
+  Link,
+  type LoaderFunctionArgs,
+  useLocation,
+  useNavigate,
+  useParams,
+  useSearchParams,
+} from 'react-router-dom';
 import { PageCard } from '../components/page-card';
 import { EmptyPage } from '../components/pages/empty-page';
 import { ErrorPage } from '../components/pages/error-page';
 import { NotFoundPage } from '../components/pages/not-found-page';
 import { CardSkeleton, LinesSkeleton } from '../components/skeletons';
+import { BY_HAND, ComesIntoSight, isByHand } from '../features/kits/comes-into-sight';
 import { KitPlan } from '../features/kits/kit-plan';
 import { kitKeys, kitList, kitSections, sectionById } from '../features/kits/queries';
 import { SectionList } from '../features/kits/section-list';
@@ -16,14 +24,21 @@ import { useLiveQuestions } from '../features/questions/use-live-questions';
 import { usePageTitle } from '../lib/page-title';
 import { useActor } from '../lib/session';
 
-export const handle = { crumbs: () => [{ label: 'Kit' }] };
+export const handle = {
+  crumbs: (kitName: string | null) =>
+    kitName ? [{ label: 'Kit', to: '/kit' }, { label: kitName }] : [{ label: 'Kit' }],
+};
 
+const pick = (kits: readonly Kit[], kitId: string | undefined) =>
+  kitId === undefined ? kits[0] : kits.find(({ id }) => id === kitId);
+
+/** Gives the kit's name. What could not be read the page itself says, and reads again. */
 export const loader =
   (queryClient: QueryClient) =>
-  ({ params }: LoaderFunctionArgs) => {
-    void queryClient.prefetchQuery(kitList);
+  async ({ params }: LoaderFunctionArgs): Promise<string | null> => {
     if (params['kitId']) void queryClient.prefetchQuery(kitSections(params['kitId']));
-    return null;
+    const kits = await queryClient.ensureQueryData(kitList).catch(() => null);
+    return pick(kits?.items ?? [], params['kitId'])?.name ?? null;
   };
 
 const MOVED = [kitKeys.all, kitKeys.sections];
@@ -41,7 +56,7 @@ export function Component() {
         <p>A kit steward puts in the sections, steps, parts and hole lines of a kit.</p>
       </EmptyPage>
     );
-  const kit = asked ? kits.items.find(({ id }) => id === asked) : kits.items[0];
+  const kit = pick(kits.items, asked);
   return kit ? <KitPage kitId={kit.id} name={kit.name} /> : <NotFoundPage what="kit" />;
 }
 
@@ -49,21 +64,40 @@ function KitPage({ kitId, name }: { readonly kitId: string; readonly name: strin
   const { data, error, refetch } = useQuery(kitSections(kitId));
   const [search] = useSearchParams();
   const navigate = useNavigate();
+  const { state } = useLocation();
   if (error && !data) return <ErrorPage error={error} onTryAgain={() => void refetch()} />;
   if (!data) return <CardSkeleton lines={8} />;
   const sections = data.items;
+  if (sections.length === 0)
+    return (
+      <EmptyPage title={`${name} has no sections yet.`}>
+        <p>A kit steward puts in its sections, steps, parts and hole lines.</p>
+      </EmptyPage>
+    );
   const chosen = sections.find(({ id }) => id === search.get('section')) ?? null;
   const addressOf = (sectionId: string) => `/kit/${kitId}?section=${sectionId}`;
-  const choose = (sectionId: string) => void navigate(addressOf(sectionId), { preventScrollReset: true });
+  const choose = (sectionId: string) =>
+    void navigate(addressOf(sectionId), { preventScrollReset: true, state: BY_HAND });
   return (
     <>
       <h1 className="unseen">{name}</h1>
       <div className={classes['kit']}>
-        <div className={classes['column']}>
+        <div className={classes['plan']}>
           <KitPlan sections={sections} chosenId={chosen?.id ?? null} onChoose={choose} />
-          {chosen && <ChosenSection key={chosen.id} summary={chosen} />}
         </div>
-        <SectionList sections={sections} chosenId={chosen?.id ?? null} addressOf={addressOf} />
+        <div className={classes['list']}>
+          <SectionList
+            sections={sections}
+            chosenId={chosen?.id ?? null}
+            addressOf={addressOf}
+            state={BY_HAND}
+          />
+        </div>
+        {chosen && (
+          <ComesIntoSight key={chosen.id} isWanted={isByHand(state)} className={classes['chosen']}>
+            <ChosenSection summary={chosen} />
+          </ComesIntoSight>
+        )}
       </div>
     </>
   );

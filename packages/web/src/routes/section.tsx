@@ -1,4 +1,4 @@
-import { canAskIn, type Section, type Step } from '@rivetside/shared';
+import { type Build, canAskIn, type Section, type Step } from '@rivetside/shared';
 import type { QueryClient } from '@tanstack/react-query';
 import { useQuery } from '@tanstack/react-query';
 import { Link, type LoaderFunctionArgs, useParams } from 'react-router-dom';
@@ -15,17 +15,22 @@ import { SectionTabs } from '../features/kits/section-tabs';
 import classes from '../features/kits/kits.module.css';
 import { useLiveQuestions } from '../features/questions/use-live-questions';
 import { usePageTitle } from '../lib/page-title';
-import { Problem } from '../lib/problem';
+import { Problem, sentenceOf } from '../lib/problem';
 import { useActor } from '../lib/session';
 
-export const handle = { crumbs: () => [{ label: 'Kit', to: '/kit' }, { label: 'Section' }] };
+export const handle = {
+  crumbs: (section: Section | null) =>
+    section
+      ? [{ label: section.kitName, to: `/kit/${section.kitId}` }, { label: section.name }]
+      : [{ label: 'Kit', to: '/kit' }, { label: 'Section' }],
+};
 
+/** What could not be read the page itself says, and reads again. */
 export const loader =
   (queryClient: QueryClient) =>
-  ({ params }: LoaderFunctionArgs) => {
-    void queryClient.prefetchQuery(sectionById(params['sectionId']!));
+  ({ params }: LoaderFunctionArgs): Promise<Section | null> => {
     void queryClient.prefetchQuery(ownBuilds);
-    return null;
+    return queryClient.ensureQueryData(sectionById(params['sectionId']!)).catch(() => null);
   };
 
 const MOVED = [kitKeys.sections];
@@ -67,14 +72,14 @@ function SectionPage({ section }: { readonly section: Section }) {
           </Link>
           {mayAsk && (
             <Link className="btn" to={`/stop?sectionId=${section.id}`}>
-              Something is wrong
+              Something is wrong here
             </Link>
           )}
         </div>
       </PageCard>
-      <PageCard title="What there is here">
+      <PageCard title="What there is here" aside={build && `your build, serial ${build.serial}`}>
         {build ? (
-          <OwnTabs section={section} buildId={build.id} mayAsk={mayAsk} />
+          <OwnTabs section={section} build={build} mayAsk={mayAsk} />
         ) : (
           <SectionTabs section={section} mayAsk={mayAsk} first="steps" />
         )}
@@ -85,28 +90,38 @@ function SectionPage({ section }: { readonly section: Section }) {
 
 interface OwnTabsProps {
   readonly section: Section;
-  readonly buildId: string;
+  readonly build: Build;
   readonly mayAsk: boolean;
 }
 
 /** With how far one's own build has come, to be set step by step. */
-function OwnTabs({ section, buildId, mayAsk }: OwnTabsProps) {
-  const { data } = useQuery(sectionProgress(buildId, section.id));
-  const set = useSetProgress(buildId, section.id);
-  const states = new Map(data?.steps.map(({ stepId, state }) => [stepId, state]));
+function OwnTabs({ section, build, mayAsk }: OwnTabsProps) {
+  const { data, error } = useQuery(sectionProgress(build.id, section.id));
+  const set = useSetProgress(build.id, section.id);
+  const states = data && new Map(data.steps.map(({ stepId, state }) => [stepId, state]));
   const progressOf = (step: Step) => (
     <StepState
       step={step}
-      state={states.get(step.id) ?? 'todo'}
+      state={states ? (states.get(step.id) ?? 'todo') : null}
       onSet={(state) => set.mutate({ steps: [{ stepId: step.id, state }] })}
     />
   );
+  const refused = set.error ?? (data ? null : error);
   return (
     <>
-      {set.error && (
-        <p role="alert">{(set.error as Partial<Problem>).title ?? 'That was not kept: try again.'}</p>
+      {refused && (
+        <p className={classes['refused']} role="alert">
+          {set.error ? 'The step was not set.' : 'How far your build has come could not be read.'}{' '}
+          {sentenceOf(refused)}
+        </p>
       )}
-      <SectionTabs section={section} mayAsk={mayAsk} progressOf={progressOf} first="steps" />
+      <SectionTabs
+        section={section}
+        mayAsk={mayAsk}
+        progressOf={progressOf}
+        serial={build.serial}
+        first="steps"
+      />
     </>
   );
 }

@@ -1,99 +1,88 @@
-import { formatLength, type HoleLine, type Section } from '@rivetside/shared';
+import { formatLength, type HoleLine, type Section, type Units } from '@rivetside/shared';
 import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { CallOut } from '../../components/call-out';
 import { useUnits } from '../../lib/units';
-import { SomethingWrong } from './something-wrong';
+import { FactTable, NumberCell } from './fact-table';
 import classes from './kits.module.css';
+import { limitWords } from './limit-words';
+import { SomethingWrong } from './something-wrong';
 
-/** Rows of holes through a stack, with the kit maker's own limits where they are given. */
-export function HoleLineTable({
-  section,
-  mayAsk,
-}: {
+interface HoleLineTableProps {
   readonly section: Section;
   readonly mayAsk: boolean;
-}): ReactNode {
+}
+
+/** Rows of holes through a stack, with the kit maker's own limits where they are given. */
+export function HoleLineTable({ section, mayAsk }: HoleLineTableProps): ReactNode {
   const units = useUnits();
-  const length = (inches: number) => formatLength(inches, units);
+  const numbers = [{ right: 'Pitch' }, { right: 'Edge' }, { right: 'Holes' }];
+  const heads = ['Hole line', 'Through', 'Rivet', 'Drill', ...numbers, mayAsk && { unseen: 'Ask' }];
   return (
-    <div className={classes['scroll']} role="region" aria-label="Hole lines" tabIndex={0}>
-      <table className={classes['table']}>
-        <thead>
-          <tr>
-            <th>Hole line</th>
-            <th>Through</th>
-            <th>Rivet</th>
-            <th className={classes['wide']}>Drill</th>
-            <th className={`${classes['right']} ${classes['wide']}`}>Pitch</th>
-            <th className={`${classes['right']} ${classes['wide']}`}>Edge</th>
-            <th className={classes['right']}>Holes</th>
-            {mayAsk && (
-              <th>
-                <span className="unseen">Ask</span>
-              </th>
+    <FactTable name="Hole lines" heads={heads}>
+      {section.holeLines.map((line) => (
+        <tr key={line.id}>
+          <td className={classes['first']}>
+            <CallOut>{line.code}</CallOut>
+            <div className="muted">
+              {line.title}, revision {line.revision}
+            </div>
+            <Limits line={line} units={units} />
+          </td>
+          <td data-label="Through" className={classes['num']}>
+            <Stack line={line} units={units} />
+          </td>
+          <td data-label="Rivet">
+            <CallOut>{line.callOut}</CallOut>
+          </td>
+          <td data-label="Drill" className={classes['num']}>
+            {line.drill} · {formatLength(line.holeDiameter, units)}
+          </td>
+          <NumberCell label="Pitch">{orNotGiven(line.pitch, units)}</NumberCell>
+          <NumberCell label="Edge">{orNotGiven(line.edge, units)}</NumberCell>
+          <NumberCell label="Holes">
+            {line.count}
+            {line.repeats > 1 ? ` × ${line.repeats}` : ''}
+            {line.questionCount > 0 && (
+              <Link className={classes['asked']} to={`/questions?holeLineId=${line.id}`}>
+                {line.questionCount} asked<span className="unseen"> at {line.code}</span>
+              </Link>
             )}
-          </tr>
-        </thead>
-        <tbody>
-          {section.holeLines.map((line) => (
-            <tr key={line.id}>
-              <td>
-                <CallOut>{line.code}</CallOut>
-                <div className="muted">{line.title}</div>
-                <Limits line={line} />
-              </td>
-              <td className={classes['num']}>{stackOf(line, length)}</td>
-              <td>
-                <CallOut>{line.callOut}</CallOut>
-              </td>
-              <td className={`${classes['num']} ${classes['wide']}`}>
-                {line.drill} · {length(line.holeDiameter)}
-              </td>
-              <td className={`${classes['num']} ${classes['right']} ${classes['wide']}`}>
-                {line.pitch === null ? '' : length(line.pitch)}
-              </td>
-              <td className={`${classes['num']} ${classes['right']} ${classes['wide']}`}>
-                {line.edge === null ? '' : length(line.edge)}
-              </td>
-              <td className={`${classes['num']} ${classes['right']}`}>
-                {line.count}
-                {line.repeats > 1 ? ` × ${line.repeats}` : ''}
-                {line.questionCount > 0 && (
-                  <div>
-                    <Link to={`/questions?holeLineId=${line.id}`}>{line.questionCount} asked</Link>
-                  </div>
-                )}
-              </td>
-              {mayAsk && (
-                <td>
-                  <SomethingWrong place={{ sectionId: section.id, holeLineId: line.id }} about={line.code} />
-                </td>
-              )}
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+          </NumberCell>
+          {mayAsk && (
+            <td>
+              <SomethingWrong place={{ sectionId: section.id, holeLineId: line.id }} about={line.code} />
+            </td>
+          )}
+        </tr>
+      ))}
+    </FactTable>
   );
 }
 
-function stackOf({ stack }: HoleLine, length: (inches: number) => string): string {
-  return stack
-    .map(({ number, thickness }) => `${number} ${thickness === null ? '' : length(thickness)}`.trim())
-    .join(' + ');
+function orNotGiven(inches: number | null, units: Units): ReactNode {
+  return inches === null ? <span className="muted">not given</span> : formatLength(inches, units);
 }
 
-function Limits({ line: { limits } }: { readonly line: HoleLine }): ReactNode {
-  if (!limits) return null;
-  const said = [
-    limits.edgeMinimumD !== null && `edge ${limits.edgeMinimumD} D`,
-    limits.pitchMinimumD !== null && `pitch ${limits.pitchMinimumD} D`,
-  ].filter(Boolean);
-  if (said.length === 0) return null;
+/** Layer by layer, the outermost first. */
+function Stack({ line, units }: { readonly line: HoleLine; readonly units: Units }): ReactNode {
   return (
-    <div className="muted">
-      at least {said.join(', ')} ({limits.source})
+    <span className={classes['stack']}>
+      {line.stack.map(({ partId, number, thickness }) => (
+        <span key={partId}>
+          {number} {thickness === null ? '' : formatLength(thickness, units)}
+        </span>
+      ))}
+    </span>
+  );
+}
+
+function Limits({ line, units }: { readonly line: HoleLine; readonly units: Units }): ReactNode {
+  const words = line.limits ? limitWords(line.limits, units) : '';
+  if (!words) return null;
+  return (
+    <div className={classes['limits']}>
+      Kit maker: {words} <span className="muted">({line.limits!.source})</span>
     </div>
   );
 }

@@ -4,7 +4,7 @@ import { PageCard } from '../../components/page-card';
 import { PlanKey } from '../../components/plan-key';
 import { PlanView } from '../../components/plan-view';
 import { SideView } from '../../components/side-view';
-import { planFills, type Shows } from './plan-fills';
+import { planFills, sectionAt, type Shows } from './plan-fills';
 import classes from './kits.module.css';
 
 interface KitPlanProps {
@@ -19,12 +19,12 @@ export function KitPlan({ sections, chosenId, onChoose }: KitPlanProps): ReactNo
   const hasBuild = sections.some(({ progress }) => progress.length > 0);
   const regions = planFills(sections, shows, chosenId);
   const chooseRegion = (region: string) => {
-    const section = sections.find((one) => one.regions.includes(region));
+    const section = sectionAt(sections, region, chosenId);
     if (section) onChoose(section.id);
   };
   return (
     <PageCard title="Plan and side view" aside="tap a region">
-      <div className={classes['plan']}>
+      <div className={classes['drawn']}>
         <PlanView name="Plan view of the kit" regions={regions} onChoose={chooseRegion} />
         <SideView name="Side view of the kit" regions={regions} onChoose={chooseRegion} />
       </div>

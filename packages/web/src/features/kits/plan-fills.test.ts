@@ -59,6 +59,6 @@ describe('what a section says of itself', () => {
   });
 
   it('tells progress without a percentage', () => {
-    expect(progressWords(['driven', 'pinned', 'todo'])).toBe('1 of 3 steps driven, 1 begun');
+    expect(progressWords(['driven', 'pinned', 'todo'])).toBe('1 of 3 steps driven, 1 pinned');
   });
 });

@@ -22,11 +22,27 @@ export function planFills(
   const regions: Record<string, PlanRegion> = {};
   for (const section of sections) {
     const drawn = shows === 'progress' ? progressFill(section) : questionsFill(section);
-    const fill = shows === 'questions' && section.id === chosenId ? 'chosen' : drawn;
+    const isChosen = section.id === chosenId;
+    const fill = shows === 'questions' && isChosen ? 'chosen' : drawn;
     const count = section.questions.waiting + section.questions.underReview;
-    for (const region of section.regions) regions[region] = { label: section.name, fill, count };
+    for (const region of section.regions) {
+      // Where two sections share a region the chosen one shows, else the first in order.
+      if (regions[region] && !isChosen) continue;
+      regions[region] = { label: section.name, fill, count, isChosen };
+    }
   }
   return regions;
+}
+
+/** The section that a tap means. Where two share a region, a second tap means the next. */
+export function sectionAt(
+  sections: readonly SectionSummary[],
+  region: string,
+  chosenId: string | null,
+): SectionSummary | undefined {
+  const there = sections.filter(({ regions }) => regions.includes(region));
+  const at = there.findIndex(({ id }) => id === chosenId);
+  return there[(at + 1) % there.length];
 }
 
 /** "8 steps · 3 open questions · critical" */
@@ -36,9 +52,9 @@ export function sectionLine({ stepCount, questions, critical }: SectionSummary):
   return [`${stepCount} steps`, asked, critical && 'critical'].filter(Boolean).join(' · ');
 }
 
-/** "3 of 8 steps driven, 2 begun", for a reader who does not see the line. */
+/** "3 of 8 steps driven, 2 pinned", for a reader who does not see the line. */
 export function progressWords(progress: SectionSummary['progress']): string {
   const count = (state: 'pinned' | 'driven') => progress.filter((one) => one === state).length;
-  const begun = count('pinned');
-  return `${count('driven')} of ${progress.length} steps driven${begun > 0 ? `, ${begun} begun` : ''}`;
+  const pinned = count('pinned');
+  return `${count('driven')} of ${progress.length} steps driven${pinned > 0 ? `, ${pinned} pinned` : ''}`;
 }

@@ -10,10 +10,12 @@ interface SectionListProps {
   readonly sections: readonly SectionSummary[];
   readonly chosenId: string | null;
   readonly addressOf: (sectionId: string) => string;
+  /** Kept with the address. */
+  readonly state: unknown;
 }
 
 /** Every section with how far the reader's own build has come there. */
-export function SectionList({ sections, chosenId, addressOf }: SectionListProps): ReactNode {
+export function SectionList({ sections, chosenId, addressOf, state }: SectionListProps): ReactNode {
   return (
     <PageCard title="Sections" aside={sections.length}>
       <ul className={classes['sections']}>
@@ -21,6 +23,7 @@ export function SectionList({ sections, chosenId, addressOf }: SectionListProps)
           <li key={section.id}>
             <Link
               to={addressOf(section.id)}
+              state={state}
               preventScrollReset
               aria-current={section.id === chosenId || undefined}
               className={classes['section']}

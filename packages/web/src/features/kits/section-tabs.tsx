@@ -12,39 +12,36 @@ interface SectionTabsProps {
   readonly mayAsk: boolean;
   readonly progressOf?: (step: Step) => ReactNode;
   readonly first?: 'parts' | 'steps';
+  /** Of the reader's own build, where they have one. */
+  readonly serial?: number | undefined;
+}
+
+function tabsOf({ section, mayAsk, progressOf, serial }: SectionTabsProps) {
+  const { parts, steps, holeLines, metHere, notices } = section;
+  const asking = { section, mayAsk };
+  return [
+    { key: 'parts', label: `Parts ${parts.length}`, body: <PartTable {...asking} /> },
+    {
+      key: 'steps',
+      label: `Steps ${steps.length}`,
+      body: <StepTable {...asking} {...(progressOf ? { progressOf } : {})} />,
+    },
+    { key: 'lines', label: `Hole lines ${holeLines.length}`, body: <HoleLineTable {...asking} /> },
+    { key: 'met', label: `What others met ${metHere.length}`, body: <MetHereList section={section} /> },
+    {
+      key: 'notices',
+      label: `Notices ${notices.length}`,
+      body: <NoticeList notices={notices} serial={serial} />,
+    },
+  ];
 }
 
 /** A section's parts, steps, hole lines, what others met and notices, one at a time. */
-export function SectionTabs({ section, mayAsk, progressOf, first = 'parts' }: SectionTabsProps): ReactNode {
+export function SectionTabs(props: SectionTabsProps): ReactNode {
+  const { section, first = 'parts' } = props;
   const id = useId();
   const buttons = useRef<(HTMLButtonElement | null)[]>([]);
-  const tabs = [
-    {
-      key: 'parts',
-      label: `Parts ${section.parts.length}`,
-      body: <PartTable section={section} mayAsk={mayAsk} />,
-    },
-    {
-      key: 'steps',
-      label: `Steps ${section.steps.length}`,
-      body: <StepTable section={section} mayAsk={mayAsk} {...(progressOf ? { progressOf } : {})} />,
-    },
-    {
-      key: 'lines',
-      label: `Hole lines ${section.holeLines.length}`,
-      body: <HoleLineTable section={section} mayAsk={mayAsk} />,
-    },
-    {
-      key: 'met',
-      label: `What others met ${section.metHere.length}`,
-      body: <MetHereList section={section} />,
-    },
-    {
-      key: 'notices',
-      label: `Notices ${section.notices.length}`,
-      body: <NoticeList notices={section.notices} />,
-    },
-  ];
+  const tabs = tabsOf(props);
   const [chosen, setChosen] = useState<string>(first);
   const move = (event: KeyboardEvent, at: number) => {
     const step = { ArrowRight: 1, ArrowLeft: -1 }[event.key];
@@ -64,7 +61,7 @@ export function SectionTabs({ section, mayAsk, progressOf, first = 'parts' }: Se
             role="tab"
             id={`${id}${key}`}
             aria-selected={key === chosen}
-            aria-controls={`${id}${key}-panel`}
+            aria-controls={key === chosen ? `${id}${key}-panel` : undefined}
             tabIndex={key === chosen ? 0 : -1}
             className={classes['tab']}
             onClick={() => setChosen(key)}

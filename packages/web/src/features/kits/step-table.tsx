@@ -1,6 +1,7 @@
 import type { Section, Step } from '@rivetside/shared';
 import type { ReactNode } from 'react';
 import { CallOut } from '../../components/call-out';
+import { FactTable } from './fact-table';
 import { SomethingWrong } from './something-wrong';
 import classes from './kits.module.css';
 
@@ -13,45 +14,35 @@ interface StepTableProps {
 
 /** The steps in the order of the manual, with what may hurt in them. */
 export function StepTable({ section, mayAsk, progressOf }: StepTableProps): ReactNode {
+  const heads = [
+    'Step',
+    'What is done',
+    progressOf ? 'My build' : false,
+    mayAsk && { unseen: 'Ask' },
+  ] as const;
   return (
-    <div className={classes['scroll']} role="region" aria-label="Steps" tabIndex={0}>
-      <table className={classes['table']}>
-        <thead>
-          <tr>
-            <th>Step</th>
-            <th>What is done</th>
-            {progressOf && <th>My build</th>}
-            {mayAsk && (
-              <th>
-                <span className="unseen">Ask</span>
-              </th>
-            )}
-          </tr>
-        </thead>
-        <tbody>
-          {section.steps.map((step) => (
-            <tr key={step.id}>
-              <td>
-                <CallOut>{step.code}</CallOut>
-              </td>
-              <td>
-                {step.title}
-                <StepNotes step={step} />
-              </td>
-              {progressOf && <td>{progressOf(step)}</td>}
-              {mayAsk && (
-                <td>
-                  <SomethingWrong
-                    place={{ sectionId: section.id, stepId: step.id }}
-                    about={`step ${step.number}`}
-                  />
-                </td>
-              )}
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+    <FactTable name="Steps" heads={heads}>
+      {section.steps.map((step) => (
+        <tr key={step.id}>
+          <td>
+            <CallOut>{step.code}</CallOut>
+          </td>
+          <td>
+            {step.title}
+            <StepNotes step={step} />
+          </td>
+          {progressOf && <td>{progressOf(step)}</td>}
+          {mayAsk && (
+            <td>
+              <SomethingWrong
+                place={{ sectionId: section.id, stepId: step.id }}
+                about={`step ${step.number}`}
+              />
+            </td>
+          )}
+        </tr>
+      ))}
+    </FactTable>
   );
 }
 
