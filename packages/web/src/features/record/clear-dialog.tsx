@@ -1,12 +1,6 @@
-import '@mantine/core/styles/UnstyledButton.css';
-import '@mantine/core/styles/CloseButton.css';
-import '@mantine/core/styles/Paper.css';
-import '@mantine/core/styles/Overlay.css';
-import '@mantine/core/styles/ModalBase.css';
-import '@mantine/core/styles/Modal.css';
-import { Modal } from '@mantine/core';
 import { clearOpenItemSchema, type OpenItem } from '@rivetside/shared';
 import { type ReactNode, type SyntheticEvent, useState } from 'react';
+import { Dialog } from '../../components/dialog';
 import { Field } from '../../components/field';
 import fieldClasses from '../../components/field.module.css';
 import { useDraft } from '../../lib/drafts';
@@ -23,19 +17,9 @@ interface ClearDialogProps {
 /** An item is cleared by saying what was done; the words stay on the device until they are sent. */
 export function ClearDialog({ item, onClose, onCleared }: ClearDialogProps): ReactNode {
   return (
-    <Modal.Root opened onClose={onClose} centered transitionProps={{ duration: 0 }} returnFocus={false}>
-      <Modal.Overlay />
-      <Modal.Content className={classes['dialog']}>
-        {/* Mantine's own header would be a second banner of the page to whoever listens to it. */}
-        <div className={classes['dialogHead']}>
-          <Modal.Title>Clear an open item</Modal.Title>
-          <Modal.CloseButton size={44} aria-label="Close without clearing" />
-        </div>
-        <Modal.Body>
-          <ClearForm item={item} onClose={onClose} onCleared={onCleared} />
-        </Modal.Body>
-      </Modal.Content>
-    </Modal.Root>
+    <Dialog title="Clear an open item" onClose={onClose}>
+      <ClearForm item={item} onClose={onClose} onCleared={onCleared} />
+    </Dialog>
   );
 }
 
@@ -56,7 +40,7 @@ function ClearForm({ item, onClose, onCleared }: ClearDialogProps): ReactNode {
     });
   };
   return (
-    <form noValidate onSubmit={handleSubmit}>
+    <form className={classes['form']} noValidate onSubmit={handleSubmit}>
       <p>{item.text}</p>
       <Field
         label="What was done"

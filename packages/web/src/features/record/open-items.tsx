@@ -18,22 +18,20 @@ interface OpenItemsProps {
 /** What must be cleared before a section is closed. */
 export function OpenItems({ items, label, mayClear, isOfOneSection = false }: OpenItemsProps): ReactNode {
   const [clearing, setClearing] = useState<OpenItem | null>(null);
-  const [cleared, setCleared] = useState('');
+  const [cleared, setCleared] = useState<OpenItem | null>(null);
   const list = useRef<HTMLDivElement>(null);
-  const focusNext = useRef<HTMLElement | null>(null);
-  // The dialog lets go of the focus when it is gone, and it would fall to the top of the page.
+  // The dialog gives the focus back to its button, and that is gone with what was cleared.
   useEffect(() => {
-    if (clearing === null) focusNext.current?.focus();
-  }, [clearing]);
+    if (cleared) list.current?.focus();
+  }, [cleared]);
   const handleCleared = (item: OpenItem) => {
-    focusNext.current = list.current;
     setClearing(null);
-    setCleared(`Cleared: ${item.text}`);
+    setCleared(item);
   };
   return (
     <div ref={list} tabIndex={-1} className={classes['openItems']}>
       <p role="status" className="unseen">
-        {cleared}
+        {cleared && `Cleared: ${cleared.text}`}
       </p>
       <ul className={classes['list']} aria-label={label}>
         {items.map((item) => (
@@ -44,10 +42,7 @@ export function OpenItems({ items, label, mayClear, isOfOneSection = false }: Op
                 type="button"
                 className="btn plain"
                 aria-label={`Clear: ${item.text}`}
-                onClick={({ currentTarget }) => {
-                  focusNext.current = currentTarget;
-                  setClearing(item);
-                }}
+                onClick={() => setClearing(item)}
               >
                 Clear
               </button>
