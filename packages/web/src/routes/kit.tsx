@@ -62,9 +62,6 @@ export function Component() {
 
 function KitPage({ kitId, name }: { readonly kitId: string; readonly name: string }) {
   const { data, error, refetch } = useQuery(kitSections(kitId));
-  const [search] = useSearchParams();
-  const navigate = useNavigate();
-  const { state } = useLocation();
   if (error && !data) return <ErrorPage error={error} onTryAgain={() => void refetch()} />;
   if (!data) return <CardSkeleton lines={8} />;
   const sections = data.items;
@@ -74,49 +71,64 @@ function KitPage({ kitId, name }: { readonly kitId: string; readonly name: strin
         <p>A kit steward puts in its sections, steps, parts and hole lines.</p>
       </EmptyPage>
     );
-  const chosen = sections.find(({ id }) => id === search.get('section')) ?? null;
-  const addressOf = (sectionId: string) => `/kit/${kitId}?section=${sectionId}`;
-  const choose = (sectionId: string) =>
-    void navigate(addressOf(sectionId), { preventScrollReset: true, state: BY_HAND });
   return (
     <>
       <h1 className="unseen">{name}</h1>
-      <div className={classes['kit']}>
-        <div className={classes['plan']}>
-          <KitPlan sections={sections} chosenId={chosen?.id ?? null} onChoose={choose} />
-        </div>
-        <div className={classes['list']}>
-          <SectionList
-            sections={sections}
-            chosenId={chosen?.id ?? null}
-            addressOf={addressOf}
-            state={BY_HAND}
-          />
-        </div>
-        {chosen && (
-          <ComesIntoSight key={chosen.id} isWanted={isByHand(state)} className={classes['chosen']}>
-            <ChosenSection summary={chosen} />
-          </ComesIntoSight>
-        )}
-      </div>
+      <KitInSections kitId={kitId} sections={sections} />
     </>
   );
 }
 
-function ChosenSection({ summary }: { readonly summary: SectionSummary }) {
+interface KitInSectionsProps {
+  readonly kitId: string;
+  readonly sections: readonly SectionSummary[];
+}
+
+/** The section chosen stands in the address. */
+function KitInSections({ kitId, sections }: KitInSectionsProps) {
+  const [search] = useSearchParams();
+  const navigate = useNavigate();
+  const { state } = useLocation();
+  const chosen = sections.find(({ id }) => id === search.get('section'));
+  const chosenId = chosen?.id ?? null;
+  const addressOf = (sectionId: string) => `/kit/${kitId}?section=${sectionId}`;
+  const choose = (sectionId: string) =>
+    void navigate(addressOf(sectionId), { preventScrollReset: true, state: BY_HAND });
+  return (
+    <div className={classes['kit']}>
+      <div className={classes['plan']}>
+        <KitPlan sections={sections} chosenId={chosenId} onChoose={choose} />
+      </div>
+      <div className={classes['list']}>
+        <SectionList sections={sections} chosenId={chosenId} addressOf={addressOf} state={BY_HAND} />
+      </div>
+      {chosen && <ChosenSection key={chosen.id} summary={chosen} isByHand={isByHand(state)} />}
+    </div>
+  );
+}
+
+interface ChosenSectionProps {
+  readonly summary: SectionSummary;
+  readonly isByHand: boolean;
+}
+
+function ChosenSection({ summary, isByHand }: ChosenSectionProps) {
   const me = useActor();
   const { data, error, refetch } = useQuery(sectionById(summary.id));
   const mayAsk = me.memberships.some(({ chapterId }) => canAskIn(me, chapterId));
   const open = <Link to={`/sections/${summary.id}`}>Open the section</Link>;
+  const isRead = data !== undefined || error !== null;
   return (
-    <PageCard title={summary.name} aside={open}>
-      {error && !data ? (
-        <ErrorPage error={error} onTryAgain={() => void refetch()} />
-      ) : !data ? (
-        <LinesSkeleton />
-      ) : (
-        <SectionTabs section={data} mayAsk={mayAsk} />
-      )}
-    </PageCard>
+    <ComesIntoSight isWanted={isByHand && isRead} className={classes['chosen']}>
+      <PageCard title={summary.name} aside={open}>
+        {error && !data ? (
+          <ErrorPage error={error} onTryAgain={() => void refetch()} />
+        ) : !data ? (
+          <LinesSkeleton />
+        ) : (
+          <SectionTabs section={data} mayAsk={mayAsk} />
+        )}
+      </PageCard>
+    </ComesIntoSight>
   );
 }

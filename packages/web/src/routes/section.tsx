@@ -50,6 +50,7 @@ function SectionPage({ section }: { readonly section: Section }) {
   const me = useActor();
   const builds = useQuery(ownBuilds).data?.items ?? [];
   const build = builds.find(({ kitId, mine }) => mine && kitId === section.kitId);
+  const own = useOwnSteps(build, section.id);
   const mayAsk = me.memberships.some(({ chapterId }) => canAskIn(me, chapterId));
   return (
     <div className={classes['column']}>
@@ -78,26 +79,29 @@ function SectionPage({ section }: { readonly section: Section }) {
         </div>
       </PageCard>
       <PageCard title="What there is here" aside={build && `your build, serial ${build.serial}`}>
-        {build ? (
-          <OwnTabs section={section} build={build} mayAsk={mayAsk} />
-        ) : (
-          <SectionTabs section={section} mayAsk={mayAsk} first="steps" />
+        {own.refusal && (
+          <p className={classes['refused']} role="alert">
+            {own.refusal}
+          </p>
         )}
+        <SectionTabs
+          section={section}
+          mayAsk={mayAsk}
+          progressOf={own.progressOf}
+          serial={build?.serial}
+          first="steps"
+        />
       </PageCard>
     </div>
   );
 }
 
-interface OwnTabsProps {
-  readonly section: Section;
-  readonly build: Build;
-  readonly mayAsk: boolean;
-}
-
-/** With how far one's own build has come, to be set step by step. */
-function OwnTabs({ section, build, mayAsk }: OwnTabsProps) {
-  const { data, error } = useQuery(sectionProgress(build.id, section.id));
-  const set = useSetProgress(build.id, section.id);
+/** How far the reader's own build has come, to be set step by step; nothing for whoever builds no such kit. */
+function useOwnSteps(build: Build | undefined, sectionId: string) {
+  const buildId = build?.id ?? '';
+  const { data, error } = useQuery({ ...sectionProgress(buildId, sectionId), enabled: build !== undefined });
+  const set = useSetProgress(buildId, sectionId);
+  if (!build) return { progressOf: undefined, refusal: null };
   const states = data && new Map(data.steps.map(({ stepId, state }) => [stepId, state]));
   const progressOf = (step: Step) => (
     <StepState
@@ -106,22 +110,7 @@ function OwnTabs({ section, build, mayAsk }: OwnTabsProps) {
       onSet={(state) => set.mutate({ steps: [{ stepId: step.id, state }] })}
     />
   );
-  const refused = set.error ?? (data ? null : error);
-  return (
-    <>
-      {refused && (
-        <p className={classes['refused']} role="alert">
-          {set.error ? 'The step was not set.' : 'How far your build has come could not be read.'}{' '}
-          {sentenceOf(refused)}
-        </p>
-      )}
-      <SectionTabs
-        section={section}
-        mayAsk={mayAsk}
-        progressOf={progressOf}
-        serial={build.serial}
-        first="steps"
-      />
-    </>
-  );
+  const unread =
+    data || !error ? null : `How far your build has come could not be read. ${sentenceOf(error)}`;
+  return { progressOf, refusal: set.error ? `The step was not set. ${sentenceOf(set.error)}` : unread };
 }

@@ -6,6 +6,7 @@ export const isByHand = (state: unknown): boolean =>
   (state as Partial<typeof BY_HAND> | null)?.chosenByHand === true;
 
 interface ComesIntoSightProps {
+  /** Once what it holds has been read: before that it is too short to be scrolled to. */
   readonly isWanted: boolean;
   readonly className: string | undefined;
   readonly children: ReactNode;

@@ -48,7 +48,7 @@ export function NumberCell({
 }): ReactNode {
   return (
     <td data-label={label} className={`${classes['num']} ${classes['right']}`}>
-      {children}
+      <div>{children}</div>
     </td>
   );
 }

@@ -25,7 +25,7 @@ export function HoleLineTable({ section, mayAsk }: HoleLineTableProps): ReactNod
           <td className={classes['first']}>
             <CallOut>{line.code}</CallOut>
             <div className="muted">
-              {line.title}, revision {line.revision}
+              {line.title}, {line.revision}
             </div>
             <Limits line={line} units={units} />
           </td>

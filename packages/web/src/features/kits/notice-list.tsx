@@ -26,7 +26,7 @@ export function NoticeList({ notices, serial }: NoticeListProps): ReactNode {
       <p>{notice.text}</p>
       <p className="muted">
         {date(notice.issuedOn)}, revision {notice.revision}, serials {notice.serialFrom} to {notice.serialTo}
-        {notice.holes ? `, holes ${notice.holes}` : ''}
+        {notice.holes ? `, holes ${notice.holes.replaceAll('-', ' to ')}` : ''}
       </p>
       {serial !== undefined && <p>{reachWords(notice, serial)}</p>}
     </div>

@@ -6,6 +6,8 @@ import { useUnits } from '../../lib/units';
 import { FactTable, NumberCell } from './fact-table';
 import { SomethingWrong } from './something-wrong';
 
+const HANDS: Readonly<Record<string, string>> = { L: 'left', R: 'right', LR: 'left and right' };
+
 interface PartTableProps {
   readonly section: Section;
   readonly mayAsk: boolean;
@@ -24,7 +26,7 @@ export function PartTable({ section, mayAsk }: PartTableProps): ReactNode {
           </td>
           <td>
             {part.name}
-            {part.hands && <span className="muted"> {part.hands}</span>}
+            {part.hands && <span className="muted">, {HANDS[part.hands] ?? part.hands}</span>}
           </td>
           <td data-label="Alloy">{part.alloy}</td>
           <NumberCell label="Thick">

@@ -49,7 +49,9 @@ export function sectionAt(
 export function sectionLine({ stepCount, questions, critical }: SectionSummary): string {
   const open = questions.waiting + questions.underReview;
   const asked = open === 0 ? 'none open' : `${open} open ${open === 1 ? 'question' : 'questions'}`;
-  return [`${stepCount} steps`, asked, critical && 'critical'].filter(Boolean).join(' · ');
+  return [stepCount === 1 ? '1 step' : `${stepCount} steps`, asked, critical && 'critical']
+    .filter(Boolean)
+    .join(' · ');
 }
 
 /** "3 of 8 steps driven, 2 pinned", for a reader who does not see the line. */

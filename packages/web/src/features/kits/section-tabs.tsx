@@ -10,7 +10,7 @@ import classes from './kits.module.css';
 interface SectionTabsProps {
   readonly section: Section;
   readonly mayAsk: boolean;
-  readonly progressOf?: (step: Step) => ReactNode;
+  readonly progressOf?: ((step: Step) => ReactNode) | undefined;
   readonly first?: 'parts' | 'steps';
   /** Of the reader's own build, where they have one. */
   readonly serial?: number | undefined;
@@ -24,7 +24,7 @@ function tabsOf({ section, mayAsk, progressOf, serial }: SectionTabsProps) {
     {
       key: 'steps',
       label: `Steps ${steps.length}`,
-      body: <StepTable {...asking} {...(progressOf ? { progressOf } : {})} />,
+      body: <StepTable {...asking} progressOf={progressOf} />,
     },
     { key: 'lines', label: `Hole lines ${holeLines.length}`, body: <HoleLineTable {...asking} /> },
     { key: 'met', label: `What others met ${metHere.length}`, body: <MetHereList section={section} /> },

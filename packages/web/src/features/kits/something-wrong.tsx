@@ -13,7 +13,7 @@ interface SomethingWrongProps {
 export function SomethingWrong({ place, about }: SomethingWrongProps): ReactNode {
   return (
     <Link className={classes['wrong']} to={`/stop${queryString(place)}`}>
-      Something is wrong here<span className="unseen">: {about}</span>
+      Something is wrong here<span className="unseen"> at {about}</span>
     </Link>
   );
 }

@@ -9,7 +9,7 @@ interface StepTableProps {
   readonly section: Section;
   readonly mayAsk: boolean;
   /** How far the reader has come in a step, where they build one. */
-  readonly progressOf?: (step: Step) => ReactNode;
+  readonly progressOf?: ((step: Step) => ReactNode) | undefined;
 }
 
 /** The steps in the order of the manual, with what may hurt in them. */
