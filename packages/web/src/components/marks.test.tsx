@@ -33,19 +33,26 @@ describe('a stamp', () => {
     expect(container.querySelectorAll('svg > path')).toHaveLength(basis === 'kitMakerReply' ? 2 : 1);
   });
 
+  it('punches the first word of a long discipline and says all of it', () => {
+    renderPart(<Stamp stamp={{ ...STAMP, discipline: 'engine' }} day="14 May 25" who="Dezso Harrowmeck" />);
+    expect(screen.getByText('ENGINE')).toBeInTheDocument();
+    expect(screen.getByRole('img')).toHaveAccessibleName(/engine and firewall forward/);
+  });
+
   it.each([
     ['held', 'HELD'],
     ['expired', 'RAN OUT'],
     ['withdrawn', 'WITHDRAWN'],
   ] as const)('is struck with a word when it is %s', (state, word) => {
-    stamped({ state });
+    const { container } = stamped({ state });
+    expect(container.querySelector('.strike')).toBeInTheDocument();
     expect(screen.getByText(word)).toBeInTheDocument();
     expect(screen.getByRole('img')).toHaveAccessibleName(expect.stringContaining(word.toLowerCase()));
   });
 
   it('is not struck while it counts', () => {
     const { container } = stamped({});
-    expect(container.querySelector('svg > g')).toBeNull();
+    expect(container.querySelector('.strike')).toBeNull();
   });
 });
 

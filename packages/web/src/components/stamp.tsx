@@ -35,7 +35,8 @@ const STATE_WORDS: Readonly<Record<StampState, string>> = {
 /** A mentor's inspection stamp. Its border tells what it rests on; one that no longer counts is struck through. */
 export function Stamp({ stamp, day, who, preview = false }: StampProps): ReactNode {
   const { stampNumber, discipline, basis, state } = stamp;
-  const mark = DISCIPLINE_WORDS[discipline].toUpperCase();
+  // There is room for one thing: "engine", of "engine and firewall forward".
+  const mark = DISCIPLINE_WORDS[discipline].split(' and ')[0]!.toUpperCase();
   const struck = STATE_WORDS[state];
   const words = [
     `Stamp ${stampNumber}`,
@@ -50,13 +51,8 @@ export function Stamp({ stamp, day, who, preview = false }: StampProps): ReactNo
       <svg viewBox="0 0 88 76" role="img" aria-label={words.filter(Boolean).join(', ')}>
         <path d={HEXAGON} className={classes['border']} data-basis={basis} />
         {basis === 'kitMakerReply' && <path d={INNER} className={classes['inner']} />}
-        <text
-          x="44"
-          y="23"
-          className={classes['mark']}
-          fontSize={mark.length > 11 ? 6.2 : mark.length > 8 ? 7.6 : 9.5}
-        >
-          {mark.length > 18 ? `${mark.slice(0, 17)}.` : mark}
+        <text x="44" y="23" className={classes['mark']} fontSize={mark.length > 8 ? 7.6 : 9.5}>
+          {mark}
         </text>
         <text x="44" y="47" className={classes['number']} fontSize={stampNumber.length > 5 ? 16 : 22}>
           {stampNumber}
@@ -64,15 +60,14 @@ export function Stamp({ stamp, day, who, preview = false }: StampProps): ReactNo
         <text x="44" y="63" className={classes['day']}>
           {day}
         </text>
-        {struck && (
-          <g className={classes['struck']}>
-            <path d="M6 66L82 10" />
-            <text x="44" y="42" transform="rotate(-36 44 38)">
-              {struck}
-            </text>
-          </g>
-        )}
+        {struck && <path d="M6 66L82 10" className={classes['strike']} />}
       </svg>
+      {/* Beside the stamp: across it the word would hide the number that it is about. */}
+      {struck && (
+        <b className={classes['struck']} aria-hidden="true">
+          {struck}
+        </b>
+      )}
       <figcaption>{who}</figcaption>
     </figure>
   );
