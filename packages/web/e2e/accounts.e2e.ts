@@ -72,18 +72,13 @@ test('a session that ends elsewhere asks for the password over the page, and wha
   const other = await (await browser.newContext()).newPage();
   await signIn(other, 'builder2');
   await other.goto('/account');
-  await other
-    .getByRole('button', { name: /Sign out|End/ })
-    .filter({ hasNotText: /everywhere/ })
-    .first()
-    .click();
-  const confirm = other.getByRole('dialog').getByRole('button').first();
-  if (await confirm.isVisible().catch(() => false)) await confirm.click();
+  await other.getByRole('button', { name: 'Sign out everywhere else' }).click();
+  await expect(other.getByRole('button', { name: 'Sign out everywhere else' })).toHaveCount(0);
   await page.getByLabel('Write to the bench').press('Enter');
   const dialog = page.getByRole('dialog');
   await expect(dialog).toBeVisible();
   await dialog.getByLabel('Password').fill('rivetside-demo');
-  await dialog.getByRole('button', { name: 'Sign in' }).click();
+  await dialog.getByRole('button', { name: 'Sign in', exact: true }).click();
   await expect(page.getByRole('log').getByText('Half a sentence that must not be lost')).toHaveCount(1);
   await other.context().close();
 });

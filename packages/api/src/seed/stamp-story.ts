@@ -2,7 +2,7 @@ import type { Endorsement } from '@rivetside/shared';
 import { newId } from '../common/ids.js';
 import { EndorsementEntity } from '../features/endorsements/endorsement.entity.js';
 import type { QuestionEntity } from '../features/questions/question.entity.js';
-import { personOf, type Telling } from './load-questions.js';
+import { personOf, type Telling } from './telling.js';
 import type { SeedStamp } from './seed.schema.js';
 
 /** One stamp from the day it was given. */

@@ -17,7 +17,7 @@ import { wall } from '../features/questions/question-door.service.js';
 import type { QuestionEntity } from '../features/questions/question.entity.js';
 import { ReferralEntity } from '../features/questions/referral.entity.js';
 import { hangPhotos } from './load-photos.js';
-import { personOf, say, type Telling } from './load-questions.js';
+import { personOf, say, type Telling } from './telling.js';
 import type { SeedFix, SeedQuestion, SeedStamp } from './seed.schema.js';
 import { STORY_ENDS_ON } from './seed-world.js';
 import { StampStory } from './stamp-story.js';

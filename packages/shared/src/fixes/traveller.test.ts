@@ -1,8 +1,8 @@
-import type { HoleCard } from '../fit-check/card-fields';
-import type { RemedyCheck } from '../fit-check/hole-card.schema';
-import { FIX_KINDS, MISHAPS } from '../words/words';
-import { proposeFixSchema } from './fix.schema';
-import { rivetCallOut, travellerFor } from './traveller';
+import type { HoleCard } from '../fit-check/card-fields.js';
+import type { RemedyCheck } from '../fit-check/hole-card.schema.js';
+import { FIX_KINDS, MISHAPS } from '../words/words.js';
+import { proposeFixSchema } from './fix.schema.js';
+import { rivetCallOut, travellerFor } from './traveller.js';
 
 const card: HoleCard = {
   layers: [{ thickness: 0.04 }, { thickness: 0.063 }],

@@ -1,4 +1,4 @@
-import { type FixFacts, type QuestionFacts, questionState, questionWaitsFor } from './question-state';
+import { type FixFacts, type QuestionFacts, questionState, questionWaitsFor } from './question-state.js';
 
 const fix = (facts: Partial<FixFacts> = {}): FixFacts => ({
   withdrawn: false,

@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import { excerptOf, fragmentsOf } from './fragments';
+import { excerptOf, fragmentsOf } from './fragments.js';
 
 describe('fragmentsOf', () => {
   it('marks words, beginnings and numbers of the trade', () => {

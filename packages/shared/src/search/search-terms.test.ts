@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import { searchQuery, searchTerms } from './search-terms';
+import { searchQuery, searchTerms } from './search-terms.js';
 
 describe('searchTerms', () => {
   it.each([
