@@ -1,22 +1,18 @@
 import { canCarryOut, type Fix, hasDesk, type Me, type Question } from '@rivetside/shared';
 import type { QueryClient } from '@tanstack/react-query';
 import { useQuery, useQueryClient } from '@tanstack/react-query';
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import { type LoaderFunctionArgs, useParams } from 'react-router-dom';
 import { AdviceLine } from '../components/advice-line';
 import { ErrorPage } from '../components/pages/error-page';
 import { NotFoundPage } from '../components/pages/not-found-page';
-import { CardSkeleton } from '../components/skeletons';
-import { EndorseDialog } from '../features/endorsements/endorse-dialog';
+import { CardSkeleton, LinesSkeleton } from '../components/skeletons';
 import endorseClasses from '../features/endorsements/endorsements.module.css';
 import { StampRow } from '../features/endorsements/stamp-row';
-import { CarryOutDialog } from '../features/fixes/carry-out-dialog';
 import { CompletionCard } from '../features/fixes/completion-card';
 import { FixCard } from '../features/fixes/fix-card';
 import { hasOutsideLine, isMentorHere, whyNoFix, whyNoStamp } from '../features/fixes/fix-words';
 import { NoFixYet } from '../features/fixes/no-fix-yet';
-import { ProposeDialog } from '../features/fixes/propose-dialog';
-import { DraftPhotos } from '../features/photos/draft-photos';
 import { HoleCardPanel } from '../features/sheet/hole-card-panel';
 import { questionSheet, sheetKeys, sheetWire } from '../features/sheet/queries';
 import { SheetActions } from '../features/sheet/sheet-actions';
@@ -32,6 +28,20 @@ import { usePageTitle } from '../lib/page-title';
 import { Problem } from '../lib/problem';
 import { useActor } from '../lib/session';
 import { standingOf } from '../lib/standing';
+
+// Whoever only reads a sheet needs none of these: each comes when it is opened.
+const EndorseDialog = lazy(async () => ({
+  default: (await import('../features/endorsements/endorse-dialog')).EndorseDialog,
+}));
+const CarryOutDialog = lazy(async () => ({
+  default: (await import('../features/fixes/carry-out-dialog')).CarryOutDialog,
+}));
+const ProposeDialog = lazy(async () => ({
+  default: (await import('../features/fixes/propose-dialog')).ProposeDialog,
+}));
+const DraftPhotos = lazy(async () => ({
+  default: (await import('../features/photos/draft-photos')).DraftPhotos,
+}));
 
 export const handle = { crumbs: () => [{ label: 'Questions', to: '/questions' }, { label: 'Sheet' }] };
 
@@ -52,7 +62,11 @@ export function Component() {
   return <Sheet key={id} sheet={sheet} />;
 }
 
-const photoSlot: PhotoSlot = (props) => <DraftPhotos {...props} />;
+const photoSlot: PhotoSlot = (props) => (
+  <Suspense fallback={<LinesSkeleton lines={1} />}>
+    <DraftPhotos {...props} />
+  </Suspense>
+);
 
 function Sheet({ sheet }: { readonly sheet: Question }) {
   const me = useActor();
@@ -132,7 +146,9 @@ function Fixes({ sheet, me }: OwnProps) {
       ))}
       {propose}
       <SheetActions sheet={sheet} me={me} />
-      {isProposing && <ProposeDialog sheet={sheet} onClose={() => setProposing(false)} />}
+      <Suspense fallback={null}>
+        {isProposing && <ProposeDialog sheet={sheet} onClose={() => setProposing(false)} />}
+      </Suspense>
     </>
   );
 }
@@ -150,15 +166,17 @@ function Give({ sheet, fix, me }: OwnProps & { readonly fix: Fix }) {
           Endorse
         </button>
       )}
-      {isOpen && (
-        <EndorseDialog
-          sheet={sheet}
-          fix={fix}
-          me={me}
-          isOutside={hasOutsideLine(fix)}
-          onClose={() => setOpen(false)}
-        />
-      )}
+      <Suspense fallback={null}>
+        {isOpen && (
+          <EndorseDialog
+            sheet={sheet}
+            fix={fix}
+            me={me}
+            isOutside={hasOutsideLine(fix)}
+            onClose={() => setOpen(false)}
+          />
+        )}
+      </Suspense>
     </div>
   );
 }
@@ -173,9 +191,11 @@ function CarryOut({ sheet, fix }: { readonly sheet: Question; readonly fix: Fix 
       <button type="button" className="btn" onClick={() => setOpen(true)}>
         Carry it out
       </button>
-      {isOpen && (
-        <CarryOutDialog sheet={sheet} fix={fix} onClose={() => setOpen(false)} photoSlot={photoSlot} />
-      )}
+      <Suspense fallback={null}>
+        {isOpen && (
+          <CarryOutDialog sheet={sheet} fix={fix} onClose={() => setOpen(false)} photoSlot={photoSlot} />
+        )}
+      </Suspense>
     </>
   );
 }
