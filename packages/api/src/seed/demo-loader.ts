@@ -1,8 +1,10 @@
 import { Injectable, Logger } from '@nestjs/common';
+import { ModuleRef } from '@nestjs/core';
 import { PreparedReader } from '../common/database/prepared-reader.js';
 import { type Tx, UnitOfWork } from '../common/database/unit-of-work.js';
 import { Passwords } from '../features/accounts/passwords.js';
 import { DEMO_PASSWORD } from '../features/demo/demo.service.js';
+import { StampExpiryJob } from '../features/endorsements/stamp-expiry.job.js';
 import { PhotoStore } from '../features/photos/photo-store.js';
 import { QuestionLogService } from '../features/questions/question-log.service.js';
 import { SearchIndexService } from '../features/search/search-index.service.js';
@@ -27,6 +29,7 @@ export class DemoLoader {
     private readonly passwords: Passwords,
     private readonly store: PhotoStore,
     private readonly index: SearchIndexService,
+    private readonly modules: ModuleRef,
   ) {}
 
   async loadIntoEmpty(): Promise<void> {
@@ -51,6 +54,8 @@ export class DemoLoader {
       clock.standAt(atNoon(STORY_ENDS_ON));
       for (const { key } of world.questions) await log.restate(tx, loading.keys.of('question', key));
     });
+    // Its own start found nothing yet; a stop before it ends is made good by the next start.
+    await this.modules.get(StampExpiryJob, { strict: false }).expire();
     this.logger.log({ questions: world.questions.length, photos: photos.size }, 'the demo world is loaded');
   }
 }

@@ -5,8 +5,8 @@ import { develop } from '../features/photos/develop.js';
 import { PhotoUseEntity } from '../features/photos/photo-use.entity.js';
 import type { PhotoStore } from '../features/photos/photo-store.js';
 import { PhotoEntity } from '../features/photos/photo.entity.js';
-import { drawPhoto } from './draw-photo.js';
 import type { Loading } from './load-kit.js';
+import { openDarkroom } from './photos/darkroom.js';
 import type { SeedPhoto, SeedQuestion } from './seed.schema.js';
 import type { SeedWorld } from './seed-world.js';
 
@@ -24,17 +24,18 @@ export interface StoredPhoto {
 
 /** Drawn, developed and stored before any row is written; files that no row names are nobody's. */
 export async function storePhotos(world: SeedWorld, store: PhotoStore): Promise<Map<string, StoredPhoto>> {
-  const scenes = world.questions.flatMap(({ photos, holeCard }) =>
-    photos.map((photo) => ({ photo, primed: holeCard?.layers[0]?.finish === 'primed' })),
+  const draw = await openDarkroom();
+  const shots = world.questions.flatMap(({ photos, holeCard: card }) =>
+    photos.map((photo) => ({ photo, card })),
   );
   const stored = new Map<string, StoredPhoto>();
   const next = async (): Promise<void> => {
-    for (let scene = scenes.pop(); scene; scene = scenes.pop()) {
-      const { width, height, files } = await develop(await drawPhoto(scene));
+    for (let shot = shots.pop(); shot; shot = shots.pop()) {
+      const { width, height, files } = await develop(await draw(shot));
       const id = newId();
       for (const [size, bytes] of Object.entries(files)) await store.put(id, size as PhotoSize, bytes);
       const sha256 = createHash('sha256').update(files.full).digest('hex');
-      stored.set(scene.photo.key, { id, seed: scene.photo, width, height, bytes: files.full.length, sha256 });
+      stored.set(shot.photo.key, { id, seed: shot.photo, width, height, bytes: files.full.length, sha256 });
     }
   };
   await Promise.all(Array.from({ length: AT_ONCE }, next));

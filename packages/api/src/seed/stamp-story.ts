@@ -75,11 +75,6 @@ export class StampStory {
     return this.show({ ...this.now(), state: 'withdrawn', withdrawn: { at, reason } });
   }
 
-  async runOut(): Promise<Endorsement> {
-    await this.write({ expiredAt: this.telling.clock.instant() });
-    return this.show({ ...this.now(), state: 'expired' });
-  }
-
   private async write(facts: Partial<EndorsementEntity>): Promise<void> {
     await this.telling.tx.manager.update(EndorsementEntity, { id: this.now().id }, facts as never);
   }

@@ -19,7 +19,6 @@ import { ReferralEntity } from '../features/questions/referral.entity.js';
 import { hangPhotos } from './load-photos.js';
 import { personOf, say, type Telling } from './telling.js';
 import type { SeedFix, SeedQuestion, SeedStamp } from './seed.schema.js';
-import { STORY_ENDS_ON } from './seed-world.js';
 import { StampStory } from './stamp-story.js';
 
 /** Something that happened on a sheet: when, and how it is written down. */
@@ -110,8 +109,7 @@ class Story {
       show(endorsement);
       await this.tell(type, this.person(by), { endorsement });
     };
-    const { held, withdrawn, reviews, goodUntil } = seed;
-    const ranOut = goodUntil < STORY_ENDS_ON && !withdrawn;
+    const { held, withdrawn, reviews } = seed;
     return [
       { at: seed.at, happen: async () => tell('endorsement', seed.by, await stamp.give(this.fix(fix).id)) },
       ...(held
@@ -127,14 +125,6 @@ class Story {
               at: withdrawn.at,
               happen: async () =>
                 tell('endorsementWithdrawn', withdrawn.by, await stamp.withdraw(withdrawn.reason)),
-            },
-          ]
-        : []),
-      ...(ranOut
-        ? [
-            {
-              at: dayAfter(goodUntil),
-              happen: async () => tell('endorsementExpired', seed.by, await stamp.runOut()),
             },
           ]
         : []),
@@ -278,5 +268,3 @@ class Story {
     return this.telling.tx;
   }
 }
-
-const dayAfter = (day: string) => new Date(Date.parse(`${day}T00:10:00Z`) + 86_400_000).toISOString();
