@@ -5,6 +5,7 @@ import type {
   Endorsement,
   Fix,
   HoleCard,
+  KitLimits,
   ProposeFix,
   Question,
 } from '@rivetside/shared';
@@ -53,6 +54,16 @@ export function aHoleCardNearAnEdge(): HoleCard {
   const [spar, doubler] = card.layers;
   return { ...card, layers: [spar!, { ...doubler!, edges: [{ distance: 0.15, angle: 90 }] }] };
 }
+
+/** What the kit maker allows on a hole line, edge alone. */
+export const KIT_LIMITS: KitLimits = {
+  edgeMinimumD: 1.7,
+  pitchMinimumD: null,
+  holeMaximum: null,
+  shopHeadMinimumWidthD: null,
+  shopHeadMinimumHeightD: null,
+  source: 'Drawing 14 rev B',
+};
 
 export function aFix(facts: Partial<ProposeFix> = {}): ProposeFix {
   return {

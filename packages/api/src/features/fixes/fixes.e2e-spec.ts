@@ -1,5 +1,11 @@
 import { type FitCheck, fitCheck, type Question } from '@rivetside/shared';
-import { aFix, aHoleCard, aHoleCardNearAnEdge, type Bench } from '../../testing/create-question.js';
+import {
+  aFix,
+  aHoleCard,
+  aHoleCardNearAnEdge,
+  type Bench,
+  KIT_LIMITS,
+} from '../../testing/create-question.js';
 import { startTestApp, type TestApp } from '../../testing/start-test-app.js';
 
 let test: TestApp;
@@ -61,7 +67,7 @@ describe('proposing a fix', () => {
   });
 
   it('checks its own numbers where it brings them, under the kit maker’s limits', async () => {
-    const limits = { edgeMinimumD: 1.7, source: 'Drawing 14 rev B' };
+    const limits = KIT_LIMITS;
     const line = await test.create.holeLine(bench.section, { limits });
     const question = await test.create.question(bench, { holeLineId: line.id });
     const fix = await test.create.fix(bench.mentors[0], question, { holeCard: aHoleCardNearAnEdge() });

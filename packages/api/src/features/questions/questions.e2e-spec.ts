@@ -1,7 +1,7 @@
 import type { Question } from '@rivetside/shared';
 import { newId } from '../../common/ids.js';
 import type { Bench } from '../../testing/create-question.js';
-import { aHoleCard } from '../../testing/create-question.js';
+import { aHoleCard, KIT_LIMITS } from '../../testing/create-question.js';
 import { startTestApp, type TestApp } from '../../testing/start-test-app.js';
 
 let test: TestApp;
@@ -64,7 +64,7 @@ describe('asking', () => {
   });
 
   it('puts the kit maker’s limits of the hole line on the card', async () => {
-    const limits = { edgeMinimumD: 1.7, source: 'Drawing 14 rev B' };
+    const limits = KIT_LIMITS;
     const line = await test.create.holeLine(bench.section, { limits });
     const { holeCard } = await test.create.question(bench, { holeLineId: line.id });
     expect(holeCard!.limits).toEqual(limits);

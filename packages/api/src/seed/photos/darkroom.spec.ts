@@ -1,7 +1,7 @@
 import sharp from 'sharp';
 import { readSeedWorld } from '../seed-world.js';
 import { type Draw, openDarkroom } from './darkroom.js';
-import { HIGH, WIDE } from './frame.js';
+import { POINTS_HIGH, POINTS_WIDE } from './frame.js';
 import { SCENES } from './scenes.js';
 
 const shots = readSeedWorld().questions.flatMap(({ photos, holeCard: card }) =>
@@ -15,7 +15,12 @@ beforeAll(async () => {
 
 /** How dark the picture is in a small window about a place in it. */
 async function greyAt(picture: Buffer, { x, y }: { x: number; y: number }): Promise<number> {
-  const window = { left: Math.round(x * WIDE) - 6, top: Math.round(y * HIGH) - 6, width: 12, height: 12 };
+  const window = {
+    left: Math.round(x * POINTS_WIDE) - 6,
+    top: Math.round(y * POINTS_HIGH) - 6,
+    width: 12,
+    height: 12,
+  };
   const { channels } = await sharp(await sharp(picture).extract(window).grayscale().toBuffer()).stats();
   return channels[0]!.mean;
 }
@@ -30,7 +35,7 @@ describe('the drawn photos', () => {
     async (_, shot) => {
       const picture = await draw(shot);
       const { width, height, format } = await sharp(picture).metadata();
-      expect([width, height, format]).toEqual([WIDE, HIGH, 'jpeg']);
+      expect([width, height, format]).toEqual([POINTS_WIDE, POINTS_HIGH, 'jpeg']);
       const { channels } = await sharp(picture).stats();
       const { mean, stdev } = channels[0]!;
       expect(mean).toBeGreaterThan(50);

@@ -2,8 +2,12 @@ import { createHash } from 'node:crypto';
 import { type HoleCard, known, type Measured, valueOf } from '@rivetside/shared';
 import type { SeedPhoto } from '../seed.schema.js';
 
+/** The field that scenes are drawn on. */
 export const WIDE = 1_440;
 export const HIGH = 1_080;
+/** What comes out, in points: fewer, as every start of a new demo waits for them. */
+export const POINTS_WIDE = 1_200;
+export const POINTS_HIGH = 900;
 
 export interface Point {
   readonly x: number;
